@@ -1,0 +1,74 @@
+import type { ProblemCode } from '../../problems/problems';
+import { plural } from '../plural';
+import { formatUnits } from '../format';
+
+type Data = Record<string, unknown>;
+export type ClientProblemCode = ProblemCode | 'no connection' | 'answer not understood';
+
+const word = (data: Data, key: string, otherwise: string) =>
+  typeof data[key] === 'string' && data[key] !== '' ? (data[key] as string) : otherwise;
+const whole = (data: Data, key: string) =>
+  typeof data[key] === 'number' ? (data[key] as number) : undefined;
+
+function more(data: Data): string {
+  const open = whole(data, 'open');
+  return open === undefined
+    ? 'That is more than is still open here. Nothing was posted.'
+    : `That is more than is still open here: ${formatUnits(open)}. Nothing was posted.`;
+}
+
+function tooMany(data: Data): string {
+  const seconds = whole(data, 'retryAfterSeconds');
+  const minutes = seconds === undefined ? undefined : Math.max(1, Math.ceil(seconds / 60));
+  return minutes === undefined
+    ? 'Too many tries. Wait a few minutes, then try again.'
+    : `Too many tries. Try again in ${minutes} ${plural(minutes, { one: 'minute', other: 'minutes' })}.`;
+}
+
+/** What happened, what is safe, what to do: a sentence for every problem, with the server's data filled in. */
+export const problems: Record<ClientProblemCode, (data: Data) => string> = {
+  'not valid': () => 'Some of this cannot be right. Nothing was stored; see the marked fields.',
+  'key missing': () =>
+    'This was sent without its number. Nothing was stored; reload the page and send it again.',
+  'not signed in': () => 'You are signed out. Sign in again; what you typed is kept.',
+  'sign-in refused': () => 'E-mail and password do not fit together. Check both, or choose a new password.',
+  'link not valid': () => 'This link has been used or is too old. Ask for a new one.',
+  'not allowed': () => 'Your role does not allow this. Nothing was changed.',
+  'request not trusted': () => 'This page is older than your sign-in. Reload it and send again.',
+  'not found': () => 'There is nothing here under this address, or it is not yours to see.',
+  'method not known': () => 'This cannot be done here. Reload the page.',
+  'already exists': (data) =>
+    `${word(data, 'what', 'This')} exists already. Choose another, or open the one there is.`,
+  'already counted': (data) => {
+    const by = word(data, 'by', 'Someone');
+    return `${by} has counted this already${data.when ? `, ${word(data, 'when', '')}` : ''}. Your count was not posted.`;
+  },
+  'already settled': (data) =>
+    `${word(data, 'by', 'Someone')} has settled this already. Nothing was posted twice.`,
+  'already answered': (data) =>
+    `${word(data, 'by', 'Someone')} has answered this already. Your answer was not posted.`,
+  'already closed': () => 'This month is closed already. Nothing was changed.',
+  'already issued': () => 'This statement went out already. Nothing was sent twice.',
+  'month closed': () => 'This month is closed. Post it as a correction, or ask finance to reopen.',
+  'month not closed': () => 'This month is still open. Close it first.',
+  'state changed': () =>
+    'Someone changed this while you were at it. Nothing was stored; reload to see how it stands now.',
+  'more than open': more,
+  'not enough units': () => 'There are not that many units there. Nothing was posted.',
+  'cannot be reckoned': (data) =>
+    word(data, 'why', 'This cannot be reckoned from what is recorded. Nothing was stored.'),
+  'too large': () => 'The file is too large. Nothing was stored; send a smaller one, up to 10 MB.',
+  'file not as named': () => 'The file is not what its name says. Send a photo (JPEG, PNG, WebP) or a PDF.',
+  'file not readable': () =>
+    'The file cannot be read. Open it in your own program to check it, save it again and send that.',
+  'content not understood': () => 'The server does not know this kind of content. Nothing was stored.',
+  'key used otherwise': () =>
+    'This was sent before with other content. What was stored first stands; reload to see it.',
+  'too many tries': tooMany,
+  'failed here': () => 'Something failed on our side. Nothing was stored unless it shows; try again.',
+  'database away': () => 'The book cannot be reached just now. Nothing is lost; try again in a moment.',
+  'no connection': () =>
+    'No connection. Nothing was sent; what you typed is kept. Try again when the network is back.',
+  'answer not understood': () =>
+    'The answer could not be read. Reload the page before you send anything again.',
+};
