@@ -1,0 +1,48 @@
+import type { RuleName } from './output';
+import type { Paper } from './papers';
+import { UsualDays } from './usual-days';
+
+export interface Pairing {
+  shipments: Paper[];
+  receipts: Paper[];
+  rule: RuleName;
+}
+
+/** What the rules have settled so far, and what still lies open. */
+export class Desk {
+  readonly pairings: Pairing[] = [];
+  readonly doubles: { receipt: Paper; of: Paper }[] = [];
+  readonly usual = new UsualDays();
+  private readonly paired = new Map<Paper, Pairing>();
+  private readonly doubled = new Set<Paper>();
+
+  constructor(
+    readonly shipments: readonly Paper[],
+    readonly receipts: readonly Paper[],
+    readonly windowDays: number,
+  ) {}
+
+  pair(pairing: Pairing): void {
+    this.pairings.push(pairing);
+    for (const paper of [...pairing.shipments, ...pairing.receipts]) this.paired.set(paper, pairing);
+  }
+
+  /** A further part of a delivery that was taken for whole. */
+  extend(pairing: Pairing, receipt: Paper): void {
+    pairing.receipts.push(receipt);
+    pairing.rule = pairing.shipments.length > 1 ? 'combined delivery' : 'split delivery';
+    this.paired.set(receipt, pairing);
+  }
+
+  double(receipt: Paper, of: Paper): void {
+    this.doubles.push({ receipt, of });
+    this.doubled.add(receipt);
+  }
+
+  isOpen(paper: Paper): boolean {
+    return !this.paired.has(paper) && !this.doubled.has(paper);
+  }
+
+  openShipments = (): Paper[] => this.shipments.filter((paper) => this.isOpen(paper));
+  openReceipts = (): Paper[] => this.receipts.filter((paper) => this.isOpen(paper));
+}
