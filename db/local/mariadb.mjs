@@ -11,7 +11,7 @@ import { clearAbandonedTestFolders, makeTestFolder, removeTestFolder } from './t
 
 /**
  * @typedef {{ ownerUrl: string, appUrl: string, socket: string, host: string, port: number,
- *   accounts: import('./accounts.mjs').Accounts, stop: () => Promise<void> }} LocalDatabase
+ *   accounts: import('./accounts.mjs').Accounts, isUp: () => boolean, stop: () => Promise<void> }} LocalDatabase
  */
 
 /**
@@ -37,6 +37,7 @@ export async function startLocalDatabase({ folder: wished, forTests = false, say
     host: '127.0.0.1',
     port: running.port,
     accounts,
+    isUp: () => isRunningWith(running.pid, folder.data),
     stop: forTests ? () => discard(running.pid, path) : () => stopIfHeld(folder),
   };
 }

@@ -1,0 +1,58 @@
+import { watchNpm } from './npm-parent.mjs';
+
+/** @type {(() => unknown)[]} */
+const closers = [];
+/** @type {Promise<never> | undefined} */
+let ending;
+
+/**
+ * Remembers what has to be undone at the end; the last is undone first.
+ * @param {() => unknown} close
+ */
+export function atEnd(close) {
+  closers.push(close);
+}
+
+/** Whether the program is on its way out, so that failures of what it ends are no news. */
+export function isEnding() {
+  return ending !== undefined;
+}
+
+/**
+ * Undoes everything and leaves. A second call joins the first.
+ * @param {number} code
+ * @returns {Promise<never>}
+ */
+export function end(code) {
+  ending ??= (async () => {
+    for (const close of closers.reverse()) {
+      try {
+        await close();
+      } catch (error) {
+        console.error(error instanceof Error ? error.message : error);
+      }
+    }
+    process.exit(code);
+  })();
+  return ending;
+}
+
+/**
+ * Runs a program of this folder: ends it in order on Ctrl-C, on a request to stop, and when the npm that
+ * started it is gone; a failure is printed as a sentence.
+ * @param {() => Promise<void>} main
+ */
+export function runUntilEnded(main) {
+  for (const signal of /** @type {const} */ (['SIGINT', 'SIGTERM', 'SIGHUP'])) {
+    process.on(signal, () => {
+      if (!isEnding()) console.log('\nStopping …');
+      void end(0);
+    });
+  }
+  watchNpm(() => void end(0));
+  main().catch((error) => {
+    if (isEnding()) return;
+    console.error(`\n\n${error instanceof Error ? error.message : error}`);
+    void end(1);
+  });
+}

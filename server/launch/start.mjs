@@ -1,0 +1,24 @@
+import { join } from 'node:path';
+import { buildClient } from './client-build.mjs';
+import { runUntilEnded } from './lifetime.mjs';
+import { recordStart } from './earlier-start.mjs';
+import { prepare, root, startRecord } from './prepare.mjs';
+import { seconds, step } from './say.mjs';
+import { signInLines } from './sign-ins.mjs';
+import { startWebServer, waitForHealth } from './web-server.mjs';
+
+runUntilEnded(async () => {
+  console.log('Tarekeep\n');
+  const { port, reach, env } = await prepare();
+  await step('Web client', (note) => buildClient(root, note));
+  await step('Web server', () => {
+    const server = startWebServer({ env, log: join(root, '.local/server.log') });
+    recordStart(startRecord, { launcher: process.pid, server: server.pid, port });
+    return waitForHealth({ port, reach, milliseconds: 60_000 });
+  });
+  console.log(`\n  Ready after ${seconds(performance.now())} at http://${reach}:${port}\n`);
+  const people = signInLines(join(root, 'seeds/demo/sign-ins.json'));
+  if (people.length > 0)
+    console.log(['Demo sign-ins:', ...people].map((line) => `  ${line}`).join('\n'), '\n');
+  console.log('  The server’s log is .local/server.log. Ctrl-C stops all of it.');
+});
