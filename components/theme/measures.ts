@@ -2,7 +2,15 @@
 export const space = { xs: 4, s: 8, m: 12, l: 16, xl: 24, xxl: 32, xxxl: 48 } as const;
 export type Space = keyof typeof space;
 
-export const typeSize = { small: 13, body: 15, large: 17, title: 20, head: 26, figure: 34, hero: 54 } as const;
+export const typeSize = {
+  small: 13,
+  body: 15,
+  large: 17,
+  title: 20,
+  head: 26,
+  figure: 34,
+  hero: 54,
+} as const;
 export type TypeSize = keyof typeof typeSize;
 
 export const lineHeight = { text: 1.4, head: 1.15 } as const;

@@ -1,3 +1,4 @@
+import { dayNumber } from '../domain/calendar';
 import { minorUnits } from '../domain/currencies';
 
 /** Groups of three are parted by a narrow space that does not break a line. */
@@ -62,22 +63,8 @@ const monthNames = [
 ] as const;
 const weekdayNames = ['Sunday', 'Monday', 'Tuesday', 'Wednesday', 'Thursday', 'Friday', 'Saturday'] as const;
 
-/** Day of the week of a Gregorian day, 0 = Sunday (Zeller's congruence, 1887). */
-function weekdayOf(year: number, month: number, date: number): number {
-  const shifted = month < 3 ? month + 12 : month;
-  const inYear = month < 3 ? year - 1 : year;
-  const century = Math.floor(inYear / 100);
-  const rest = inYear % 100;
-  const saturdayFirst =
-    (date +
-      Math.floor((13 * (shifted + 1)) / 5) +
-      rest +
-      Math.floor(rest / 4) +
-      Math.floor(century / 4) +
-      5 * century) %
-    7;
-  return (saturdayFirst + 6) % 7;
-}
+/** 0 = Sunday; day 0 of the calendar was a Thursday. */
+const weekdayOf = (day: string) => (((dayNumber(day) + 4) % 7) + 7) % 7;
 
 /**
  * A business day ('YYYY-MM-DD') in words. "short" "27 Nov", "long" "27 November 2026", "weekday" "Friday 27 November",
@@ -88,7 +75,7 @@ export function formatDay(day: string, style: 'short' | 'date' | 'weekday' | 'lo
   const name = monthNames[month - 1] ?? '';
   if (style === 'short') return `${date} ${name.slice(0, 3)}`;
   if (style === 'date') return `${date} ${name}`;
-  if (style === 'weekday') return `${weekdayNames[weekdayOf(year, month, date)]} ${date} ${name}`;
+  if (style === 'weekday') return `${weekdayNames[weekdayOf(day)]} ${date} ${name}`;
   return `${date} ${name} ${year}`;
 }
 

@@ -1,0 +1,43 @@
+import type { ReactNode } from 'react';
+import { StyleSheet, View, type ViewStyle } from 'react-native';
+import { space, type Space } from '../theme/measures';
+
+type Props = {
+  children?: ReactNode;
+  gap?: Space;
+  /** Things beside each other rather than below. */
+  row?: boolean;
+  wrap?: boolean;
+  align?: 'start' | 'center' | 'end' | 'stretch' | 'baseline';
+  spread?: 'start' | 'between' | 'end';
+  grow?: boolean;
+  pad?: Space;
+  /** Least width in px before things wrap. */
+  least?: number;
+};
+
+const aligned = {
+  start: 'flex-start',
+  center: 'center',
+  end: 'flex-end',
+  stretch: 'stretch',
+  baseline: 'baseline',
+} as const;
+const spreadOut = { start: 'flex-start', between: 'space-between', end: 'flex-end' } as const;
+
+/** Lays things out below or beside each other, with gaps from the scale. */
+export function Box({ children, gap = 'm', row, wrap, align, spread, grow, pad, least }: Props) {
+  const style: ViewStyle = {
+    gap: space[gap],
+    flexDirection: row ? 'row' : 'column',
+    ...(wrap ? { flexWrap: 'wrap' } : {}),
+    ...(align ? { alignItems: aligned[align] } : row ? { alignItems: 'center' } : {}),
+    ...(spread ? { justifyContent: spreadOut[spread] } : {}),
+    ...(grow ? { flexGrow: 1, flexShrink: 1, flexBasis: least ?? 0 } : {}),
+    ...(pad ? { padding: space[pad] } : {}),
+    ...(least && !grow ? { minWidth: least } : {}),
+  };
+  return <View style={[styles.box, style]}>{children}</View>;
+}
+
+const styles = StyleSheet.create({ box: { minWidth: 0 } });

@@ -1,0 +1,158 @@
+import { useState } from 'react';
+import { View } from 'react-native';
+import Svg, { Line, Path, Text as SvgText } from 'react-native-svg';
+import { text } from '@/shared/text/catalogue';
+import { formatNumber } from '@/shared/text/format';
+import { fontFamily, typeSize } from '../theme/measures';
+import { meaning, tones, type Tone } from '../theme/meaning';
+import { Box } from './Box';
+import { chartScale, type Point } from './chart-scale';
+import { Disclosure } from './Disclosure';
+import { Sheet } from './Sheet';
+import { Key } from './Strip';
+import { Text } from './Text';
+
+export type Series = { key: string; label: string; tone: Tone; dashed?: boolean; points: readonly Point[] };
+export type Marker = { key: string; x: number; label: string; tone: Tone };
+
+type Props = {
+  label: string;
+  /** The curve in one or two sentences, for those who do not see it. */
+  summary: string;
+  xHead: string;
+  series: readonly Series[];
+  markers?: readonly Marker[];
+  yMost?: number;
+  formatX?: (x: number) => string;
+  formatY?: (y: number) => string;
+};
+
+const height = 300;
+
+/** Curves over one axis, with marker lines; the same numbers stand in a table that can be opened. */
+export function LineChart(props: Props) {
+  const { label, summary, series } = props;
+  return (
+    <Box gap="s">
+      <Plot {...props} />
+      <Key parts={series} />
+      <Text variant="soft">{summary}</Text>
+      <Disclosure label={text.ui.numbersInATable}>
+        <Numbers {...props} label={label} />
+      </Disclosure>
+    </Box>
+  );
+}
+
+function Plot({
+  label,
+  summary,
+  series,
+  markers = [],
+  yMost = 1,
+  formatX = String,
+  formatY = formatNumber,
+}: Props) {
+  const [width, setWidth] = useState(640);
+  const all = series.flatMap((each) => each.points);
+  if (all.length === 0) return null;
+  const { x, y, xTicks, yTicks, pathOf, margin } = chartScale(all, { width, height }, yMost);
+  const small = { fontFamily, fontSize: typeSize.small, fill: meaning.textSoft };
+  return (
+    <View
+      role="img"
+      aria-label={`${label}. ${summary}`}
+      onLayout={(event) => setWidth(event.nativeEvent.layout.width)}
+    >
+      <Svg width="100%" height={height} aria-hidden>
+        {yTicks.map((tick) => (
+          <Line
+            key={`y${tick}`}
+            x1={margin.left}
+            x2={width - margin.right}
+            y1={y(tick)}
+            y2={y(tick)}
+            stroke={tick === 0 ? meaning.text : meaning.line}
+            strokeWidth={tick === 0 ? 2 : 1}
+          />
+        ))}
+        {[0, yMost].map((tick) => (
+          <SvgText key={`n${tick}`} x={margin.left - 8} y={y(tick) + 4} textAnchor="end" {...small}>
+            {formatY(tick)}
+          </SvgText>
+        ))}
+        {xTicks.map((tick) => (
+          <SvgText key={`x${tick}`} x={x(tick)} y={height - 6} textAnchor="middle" {...small}>
+            {formatX(tick)}
+          </SvgText>
+        ))}
+        {markers.map((marker, at) => (
+          <MarkerLine
+            key={marker.key}
+            marker={marker}
+            x={x(marker.x)}
+            end={at === 0 && markers.length > 1}
+            top={margin.top}
+          />
+        ))}
+        {series.map((each) => (
+          <Path
+            key={each.key}
+            d={pathOf(each.points)}
+            fill="none"
+            stroke={tones[each.tone].line}
+            strokeWidth={each.dashed ? 2.5 : 3.5}
+            {...(each.dashed ? { strokeDasharray: '7 5' } : {})}
+          />
+        ))}
+      </Svg>
+    </View>
+  );
+}
+
+function MarkerLine({ marker, x, end, top }: { marker: Marker; x: number; end: boolean; top: number }) {
+  const colour = tones[marker.tone].line;
+  return (
+    <>
+      <Line x1={x} x2={x} y1={top} y2={height - 28} stroke={colour} strokeWidth={2} />
+      <SvgText
+        x={end ? x - 4 : x + 4}
+        y={top - 8}
+        textAnchor={end ? 'end' : 'start'}
+        fontFamily={fontFamily}
+        fontSize={typeSize.small}
+        fontWeight="700"
+        fill={colour}
+      >
+        {marker.label}
+      </SvgText>
+    </>
+  );
+}
+
+function Numbers({ label, xHead, series, formatX = String, formatY = formatNumber }: Props) {
+  const rows = [...new Set(series.flatMap((each) => each.points.map((point) => point.x)))].sort(
+    (a, b) => a - b,
+  );
+  const valueAt = (each: Series, x: number) => each.points.find((point) => point.x === x)?.y;
+  return (
+    <Sheet
+      caption={label}
+      hideCaption
+      rows={rows}
+      rowKey={String}
+      columns={[
+        { key: 'x', head: xHead, cell: (x) => formatX(x) },
+        ...series.map((each) => ({
+          key: each.key,
+          head: each.label,
+          align: 'end' as const,
+          cell: (x: number) => {
+            const value = valueAt(each, x);
+            return value === undefined ? '–' : formatY(value);
+          },
+        })),
+      ]}
+    />
+  );
+}
