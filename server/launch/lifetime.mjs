@@ -41,15 +41,16 @@ export function end(code) {
  * Runs a program of this folder: ends it in order on Ctrl-C, on a request to stop, and when the npm that
  * started it is gone; a failure is printed as a sentence.
  * @param {() => Promise<void>} main
+ * @param {number} [stopped] the exit code when it is asked to stop
  */
-export function runUntilEnded(main) {
+export function runUntilEnded(main, stopped = 0) {
   for (const signal of /** @type {const} */ (['SIGINT', 'SIGTERM', 'SIGHUP'])) {
     process.on(signal, () => {
       if (!isEnding()) console.log('\nStopping …');
-      void end(0);
+      void end(stopped);
     });
   }
-  watchNpm(() => void end(0));
+  watchNpm(() => void end(stopped));
   main().catch((error) => {
     if (isEnding()) return;
     console.error(`\n\n${error instanceof Error ? error.message : error}`);

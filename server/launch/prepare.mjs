@@ -1,15 +1,14 @@
 import { mkdirSync } from 'node:fs';
-import { dirname, join } from 'node:path';
-import { fileURLToPath } from 'node:url';
+import { join } from 'node:path';
 import { fillDatabase, provideDatabase } from './database.mjs';
 import { claimPort, clearEarlierStart, forgetStart, recordStart } from './earlier-start.mjs';
 import { atEnd } from './lifetime.mjs';
 import { installPackagesOfLock } from './packages.mjs';
+import { root } from './project.mjs';
 import { step } from './say.mjs';
 import { sessionSecret } from './secrets.mjs';
 import { checkNode, hostSetting, portSetting, readSettingsFile } from './settings.mjs';
 
-export const root = join(dirname(fileURLToPath(import.meta.url)), '../..');
 export const startRecord = join(root, '.local/start.json');
 
 /**

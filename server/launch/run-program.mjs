@@ -23,15 +23,16 @@ export async function runProgram(program, args, { env, shown = false } = {}) {
 /**
  * @param {string} program
  * @param {string[]} args
- * @param {{ env?: NodeJS.ProcessEnv, shown?: boolean }} [how]
+ * @param {{ env?: NodeJS.ProcessEnv, shown?: boolean, limit?: number }} [how] limit: milliseconds it may take
  * @returns {Promise<{ code: number | null, signal: string | null, output: string }>}
  */
-export function tryProgram(program, args, { env, shown = false } = {}) {
+export function tryProgram(program, args, { env, shown = false, limit } = {}) {
   const child = spawn(program, args, {
     env: { ...process.env, ...env },
     stdio: shown ? ['ignore', 'inherit', 'inherit'] : ['ignore', 'pipe', 'pipe'],
   });
   running.add(child);
+  const timer = limit && setTimeout(() => void endProcess(child.pid ?? 0, 5_000), limit);
   let output = '';
   for (const stream of [child.stdout, child.stderr]) {
     stream?.setEncoding('utf8').on('data', (text) => (output += text));
@@ -40,6 +41,7 @@ export function tryProgram(program, args, { env, shown = false } = {}) {
     child.once('error', reject);
     child.once('close', (code, signal) => {
       running.delete(child);
+      clearTimeout(timer);
       resolve({ code, signal, output });
     });
   });

@@ -20,7 +20,7 @@ export class NotDecimal extends Error {
 /** A plain decimal such as "12", "-0.35"; no exponent, blank, sign +, leading zero. "-0" becomes "0". */
 export const decimalString = z
   .string()
-  .regex(plain)
+  .regex(plain, { error: 'not a plain decimal number', abort: true })
   .overwrite((text) => text.replace(minusZero, '$1'));
 
 /** A decimal of 0 or more: rates, fees, percentages. */

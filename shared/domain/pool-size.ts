@@ -1,10 +1,5 @@
-import {
-  coverOf,
-  type Distribution,
-  distributionOf,
-  MOST_CONTAINERS,
-  neededForCover,
-} from './pool-size/cover';
+import { type CountDistribution, poisson } from './pool-size/count-distribution';
+import { countAtPeak, type Distribution, distributionOf } from './pool-size/cover';
 import { erlangB, fallbackShare } from './pool-size/erlang-b';
 import { parsePoolInput, type PoolInput } from './pool-size/input';
 import { loopTime, type LoopTime, stillOutAfter } from './pool-size/loop-time';
@@ -49,8 +44,8 @@ export interface PoolCurvePoint {
 /** How many containers the loop needs, and why (RULES 7). Refuses what cannot be with CannotSize. */
 export function sizePool(raw: unknown): PoolSize {
   const input = parsePoolInput(raw);
-  const { dispatch, loop, peak, average } = loopOf(input);
-  const forCover = neededForCover(peak, input.coverProbability);
+  const { dispatch, loop, peak, average, inLoop } = loopOf(input);
+  const forCover = inLoop.smallestCovering(input.coverProbability);
   const forBuffer = roundUp(dispatch.mean * (loop.mean + input.bufferDays));
   const needed = checkedCount(Math.max(forCover, forBuffer, 1));
   const poolSize = poolOf(needed, input);
@@ -69,7 +64,7 @@ export function sizePool(raw: unknown): PoolSize {
     neededForBuffer: forBuffer,
     needed,
     poolSize,
-    poissonNeeded: neededForCover({ mean: average, variance: average }, input.coverProbability),
+    poissonNeeded: poisson(average).smallestCovering(input.coverProbability),
     fallbackShareAtNeeded: fallbackShare(average, needed),
     tripsPerYear,
     tripsPerContainerPerYear: tripsPerYear / poolSize,
@@ -88,24 +83,27 @@ export function poolCurve(
 ): PoolCurvePoint[] {
   const input = parsePoolInput(raw);
   const wanted = pointsOf(range);
-  const { peak, average } = loopOf(input);
-  const cover = coverOf(peak);
+  const { average, inLoop } = loopOf(input);
   const points: PoolCurvePoint[] = [];
   let containers = 0;
   for (const share of erlangB(average, range.to)) {
     if (wanted.has(containers)) {
       const poolSize = poolOf(containers, input);
-      points.push({ containers, poolSize, cover: cover(containers), fallbackShare: share });
+      points.push({ containers, poolSize, cover: inLoop.atMost(containers), fallbackShare: share });
     }
     containers += 1;
   }
   return points;
 }
 
+/** The largest pool that is sized: far above any plant, and still summed in a moment. */
+const MOST_CONTAINERS = 10_000_000;
+
 interface Loop {
   dispatch: Dispatch;
   loop: LoopTime;
   peak: Peak;
+  inLoop: CountDistribution;
   /** Containers in the loop on average: Little's law. */
   average: number;
 }
@@ -115,7 +113,8 @@ function loopOf(input: PoolInput): Loop {
   const loop = loopTime(input.legs);
   const average = dispatch.mean * loop.mean;
   checkedCount(dispatch.mean * (loop.mean + input.bufferDays));
-  return { dispatch, loop, average, peak: peakInLoop(dispatch, stillOutAfter(loop), input.travel) };
+  const peak = peakInLoop(dispatch, stillOutAfter(loop), input.travel);
+  return { dispatch, loop, average, peak, inLoop: countAtPeak(peak) };
 }
 
 /** The pool from which so many stay free for the loop, beside those held for quality and in repair. */

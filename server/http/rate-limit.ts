@@ -1,0 +1,58 @@
+import type { Pool } from 'mysql2/promise';
+import { RateLimiterMemory, RateLimiterMySQL, RateLimiterRes } from 'rate-limiter-flexible';
+import { Problem } from '@/shared/problems/problems';
+
+export type Limits = {
+  /** Wrong passwords per account. */
+  account: RateLimiterMySQL;
+  /** Wrong passwords per address. */
+  address: RateLimiterMySQL;
+  /** Links asked for, per address of mail and of network. */
+  links: RateLimiterMySQL;
+};
+
+/** Counters in MariaDB, shared by all servers; in memory only while the database is away. */
+export function rateLimits(pool: Pool): Limits {
+  const limiter = (keyPrefix: string, rule: { points: number; duration: number; blockDuration?: number }) =>
+    new RateLimiterMySQL({
+      storeClient: (pool as unknown as { pool: unknown }).pool,
+      storeType: 'mysql2',
+      dbName: databaseOf(pool),
+      tableName: 'rate_limits',
+      tableCreated: true,
+      clearExpiredByTimeout: false,
+      keyPrefix,
+      insuranceLimiter: new RateLimiterMemory(rule),
+      ...rule,
+    });
+  return {
+    account: limiter('account', { points: 10, duration: 900, blockDuration: 120 }),
+    address: limiter('address', { points: 40, duration: 900, blockDuration: 300 }),
+    links: limiter('link', { points: 5, duration: 3600 }),
+  };
+}
+
+function databaseOf(pool: Pool): string {
+  const inner = (pool as unknown as { pool: { config: { connectionConfig: { database: string } } } }).pool;
+  return inner.config.connectionConfig.database;
+}
+
+/** Refuses when the key has used up its tries, without using one. */
+export async function refuseWhenSpent(limiter: RateLimiterMySQL, key: string): Promise<void> {
+  const held = await limiter.get(key);
+  if (held && held.consumedPoints >= limiter.points && held.msBeforeNext > 0) throw tooMany(held);
+}
+
+/** Uses one try of the key; refuses when there is none left. */
+export async function useTry(limiter: RateLimiterMySQL, key: string): Promise<void> {
+  try {
+    await limiter.consume(key);
+  } catch (error) {
+    if (error instanceof RateLimiterRes) throw tooMany(error);
+    throw error;
+  }
+}
+
+function tooMany(held: RateLimiterRes): Problem {
+  return new Problem('too many tries', { data: { seconds: Math.ceil(held.msBeforeNext / 1000) } });
+}
