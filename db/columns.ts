@@ -47,4 +47,3 @@ export const json = customType<{ data: unknown; driverData: string }>({
   fromDriver: (value) => JSON.parse(value) as unknown,
   toDriver: (value) => JSON.stringify(value),
 });
-

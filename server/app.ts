@@ -13,6 +13,7 @@ import { openApiOf } from './http/openapi';
 import { rateLimits } from './http/rate-limit';
 import { currentPerson, sessions } from './http/session';
 import { csrfToken, fromOwnPages } from './http/trust';
+import { healthRoutes } from './modules/health/router';
 import { allRoutes } from './routes';
 
 /** The whole program over HTTP, from what it is handed. */
@@ -27,7 +28,13 @@ export function createApp(deps: Deps): Express {
       logger: deps.logger,
       genReqId: () => randomUUID(),
       autoLogging: { ignore: (request) => !request.url?.startsWith('/api/') },
-      serializers: { req: (request: { id: string; method: string; url: string }) => ({ id: request.id, method: request.method, path: request.url.split('?')[0] }) },
+      serializers: {
+        req: (request: { id: string; method: string; url: string }) => ({
+          id: request.id,
+          method: request.method,
+          path: request.url.split('?')[0],
+        }),
+      },
     }),
   );
   app.use((request, response, next) => {
@@ -55,9 +62,16 @@ function api(deps: Deps): express.Router {
   router.get('/openapi.json', (_request, response) => {
     response.json(openApiOf(routes));
   });
+  // Asked by machines every few seconds: no session for it.
+  router.use(mount(healthRoutes, deps));
   router.use(fromOwnPages(deps.config.PUBLIC_URL));
-  router.use(/^\/(?!health$)/, sessions(deps), passport.session(), currentPerson(deps), csrfToken);
+  router.use(sessions(deps), passport.session(), currentPerson(deps), csrfToken);
   router.use(express.json({ limit: '1mb', strict: true }));
-  router.use(mount(routes, deps));
+  router.use(
+    mount(
+      routes.filter((route) => !healthRoutes.includes(route)),
+      deps,
+    ),
+  );
   return router;
 }

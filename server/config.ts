@@ -29,7 +29,9 @@ export type Config = Omit<z.output<typeof settings>, 'PUBLIC_URL'> & { PUBLIC_UR
 
 /** Parses the environment; every bad variable is named at once. */
 export function readConfig(environment: Record<string, string | undefined>): Config {
-  const given = Object.fromEntries(Object.entries(environment).filter(([, value]) => value !== undefined && value !== ''));
+  const given = Object.fromEntries(
+    Object.entries(environment).filter(([, value]) => value !== undefined && value !== ''),
+  );
   const parsed = settings.safeParse(given);
   if (!parsed.success) {
     const named = parsed.error.issues.map((issue) => `  ${issue.path.join('.')}: ${issue.message}`);

@@ -30,8 +30,13 @@ const deps: Deps = {
   clock: { now: () => new Date() },
 };
 
-const server = createServer({ maxHeaderSize: 16_384, headersTimeout: 15_000, requestTimeout: 120_000 }, createApp(deps));
-const worker = config.RUN_JOBS ? startWorker(deps, { mailer: mailerOf(config.SMTP_URL), handlers: jobHandlers, scheduled }) : null;
+const server = createServer(
+  { maxHeaderSize: 16_384, headersTimeout: 15_000, requestTimeout: 120_000 },
+  createApp(deps),
+);
+const worker = config.RUN_JOBS
+  ? startWorker(deps, { mailer: mailerOf(config.SMTP_URL), handlers: jobHandlers, scheduled })
+  : null;
 
 server.listen(config.PORT, config.HOST, () => logger.info({ port: config.PORT }, 'listening'));
 server.on('error', (error) => {

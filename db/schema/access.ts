@@ -27,7 +27,10 @@ export const requests = mysqlTable(
     answer: json('answer'),
     createdAt: instant('created_at').notNull(),
   },
-  (table) => [primaryKey({ columns: [table.personId, table.key] }), index('requests_created').on(table.createdAt)],
+  (table) => [
+    primaryKey({ columns: [table.personId, table.key] }),
+    index('requests_created').on(table.createdAt),
+  ],
 );
 
 /** Who did what. Append-only by right. */
@@ -46,5 +49,8 @@ export const log = mysqlTable(
     requestId: varchar('request_id', { length: 60 }).notNull(),
     address: varchar('address', { length: 60 }),
   },
-  (table) => [index('log_person').on(table.personId, table.id), index('log_subject').on(table.subjectId, table.id)],
+  (table) => [
+    index('log_person').on(table.personId, table.id),
+    index('log_subject').on(table.subjectId, table.id),
+  ],
 );

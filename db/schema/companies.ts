@@ -17,7 +17,10 @@ export const companies = mysqlTable(
     /** Percent, e.g. "25.000000". */
     taxRate: rate('tax_rate').notNull().default('0.000000'),
     /** Directive 2006/112/EC art. 92: (a) deposits left out of the taxable amount, or (b) included. */
-    taxTreatment: varchar('tax_treatment', { length: 10 }).$type<'excluded' | 'included'>().notNull().default('excluded'),
+    taxTreatment: varchar('tax_treatment', { length: 10 })
+      .$type<'excluded' | 'included'>()
+      .notNull()
+      .default('excluded'),
     objectionDays: int('objection_days').notNull().default(14),
     autoCountDays: int('auto_count_days').notNull().default(10),
     overdueAfterDays: int('overdue_after_days').notNull().default(7),
@@ -64,7 +67,10 @@ export const people = mysqlTable(
     lastSignedInAt: instant('last_signed_in_at'),
     createdAt: instant('created_at').notNull(),
   },
-  (table) => [uniqueIndex('people_email').on(table.email), index('people_company').on(table.companyId, table.name, table.id)],
+  (table) => [
+    uniqueIndex('people_email').on(table.email),
+    index('people_company').on(table.companyId, table.name, table.id),
+  ],
 );
 
 export const personRoles = mysqlTable(
@@ -92,7 +98,10 @@ export const personTokens = mysqlTable(
     usedAt: instant('used_at'),
     createdAt: instant('created_at').notNull(),
   },
-  (table) => [uniqueIndex('person_tokens_hash').on(table.tokenHash), index('person_tokens_person').on(table.personId)],
+  (table) => [
+    uniqueIndex('person_tokens_hash').on(table.tokenHash),
+    index('person_tokens_person').on(table.personId),
+  ],
 );
 
 /** What a partner pays for a type from a day on (RULES 3). Rows are never changed; a later version supersedes. */

@@ -1,4 +1,13 @@
-import { boolean, decimal, index, int, mysqlTable, primaryKey, uniqueIndex, varchar } from 'drizzle-orm/mysql-core';
+import {
+  boolean,
+  decimal,
+  index,
+  int,
+  mysqlTable,
+  primaryKey,
+  uniqueIndex,
+  varchar,
+} from 'drizzle-orm/mysql-core';
 import { amount, code, day, id, instant, json, rate } from '../columns';
 import { people, sites } from './companies';
 

@@ -79,7 +79,14 @@ export const disputeStates = [
   'withdrawn',
 ] as const;
 export type DisputeState = (typeof disputeStates)[number];
-export const disputeReasons = ['counted wrongly', 'sent them back', 'never arrived', 'arrived damaged', 'wrong rate', 'other'] as const;
+export const disputeReasons = [
+  'counted wrongly',
+  'sent them back',
+  'never arrived',
+  'arrived damaged',
+  'wrong rate',
+  'other',
+] as const;
 
 export const disputes = mysqlTable(
   'disputes',
@@ -149,5 +156,8 @@ export const disputeFiles = mysqlTable(
       .notNull()
       .references(() => files.id),
   },
-  (table) => [index('dispute_files_message').on(table.messageId), index('dispute_files_file').on(table.fileId)],
+  (table) => [
+    index('dispute_files_message').on(table.messageId),
+    index('dispute_files_file').on(table.fileId),
+  ],
 );

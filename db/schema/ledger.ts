@@ -1,4 +1,13 @@
-import { bigint, check, index, int, mysqlTable, primaryKey, uniqueIndex, varchar } from 'drizzle-orm/mysql-core';
+import {
+  bigint,
+  check,
+  index,
+  int,
+  mysqlTable,
+  primaryKey,
+  uniqueIndex,
+  varchar,
+} from 'drizzle-orm/mysql-core';
 import { sql } from 'drizzle-orm';
 import { code, day, id, instant, units } from '../columns';
 import { companies, people, sites } from './companies';

@@ -21,7 +21,10 @@ export const outbox = mysqlTable(
     sentAt: instant('sent_at'),
     createdAt: instant('created_at').notNull(),
   },
-  (table) => [index('outbox_waiting').on(table.state, table.notBefore), uniqueIndex('outbox_message').on(table.messageId)],
+  (table) => [
+    index('outbox_waiting').on(table.state, table.notBefore),
+    uniqueIndex('outbox_message').on(table.messageId),
+  ],
 );
 
 /** Long work, taken by one worker at a time under a lease. */
@@ -45,7 +48,10 @@ export const jobs = mysqlTable(
     createdAt: instant('created_at').notNull(),
     endedAt: instant('ended_at'),
   },
-  (table) => [uniqueIndex('jobs_once').on(table.onceKey), index('jobs_waiting').on(table.state, table.claimedUntil)],
+  (table) => [
+    uniqueIndex('jobs_once').on(table.onceKey),
+    index('jobs_waiting').on(table.state, table.claimedUntil),
+  ],
 );
 
 /** A scheduled run happens once over all servers: one row per name and slot. */
@@ -65,7 +71,9 @@ export const imports = mysqlTable(
   {
     id: id('id').primaryKey(),
     fileName: varchar('file_name', { length: 200 }).notNull(),
-    state: varchar('state', { length: 10 }).$type<'preview' | 'running' | 'done' | 'failed' | 'dropped'>().notNull(),
+    state: varchar('state', { length: 10 })
+      .$type<'preview' | 'running' | 'done' | 'failed' | 'dropped'>()
+      .notNull(),
     rowsGood: int('rows_good').notNull(),
     rowsBad: int('rows_bad').notNull(),
     jobId: id('job_id'),
@@ -89,7 +97,10 @@ export const importRows = mysqlTable(
     problems: json('problems').notNull(),
     bad: int('bad').notNull(),
   },
-  (table) => [primaryKey({ columns: [table.importId, table.rowNo] }), index('import_rows_bad').on(table.importId, table.bad, table.rowNo)],
+  (table) => [
+    primaryKey({ columns: [table.importId, table.rowNo] }),
+    index('import_rows_bad').on(table.importId, table.bad, table.rowNo),
+  ],
 );
 
 /** A receipt from a file: matched at once, offered for a match, or left as unannounced. */
@@ -108,12 +119,17 @@ export const receipts = mysqlTable(
       .notNull()
       .references(() => sites.id),
     countedOn: day('counted_on').notNull(),
-    state: varchar('state', { length: 12 }).$type<'matched' | 'duplicate' | 'unannounced' | 'booked'>().notNull(),
+    state: varchar('state', { length: 12 })
+      .$type<'matched' | 'duplicate' | 'unannounced' | 'booked'>()
+      .notNull(),
     rule: varchar('rule', { length: 24 }),
     duplicateOf: id('duplicate_of'),
     createdAt: instant('created_at').notNull(),
   },
-  (table) => [index('receipts_state').on(table.state, table.countedOn, table.id), index('receipts_import').on(table.importId)],
+  (table) => [
+    index('receipts_state').on(table.state, table.countedOn, table.id),
+    index('receipts_import').on(table.importId),
+  ],
 );
 
 export const receiptLines = mysqlTable(
@@ -145,5 +161,8 @@ export const receiptMatches = mysqlTable(
     decidedBy: id('decided_by').references(() => people.id),
     decidedAt: instant('decided_at'),
   },
-  (table) => [index('receipt_matches_receipt').on(table.receiptId), index('receipt_matches_state').on(table.state, table.id)],
+  (table) => [
+    index('receipt_matches_receipt').on(table.receiptId),
+    index('receipt_matches_state').on(table.state, table.id),
+  ],
 );

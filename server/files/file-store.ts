@@ -30,6 +30,10 @@ export function folderStore(folder: string): FileStore {
       }
     },
     open: (sha256) => createReadStream(placeOf(sha256)),
-    has: (sha256) => stat(placeOf(sha256)).then(() => true, () => false),
+    has: (sha256) =>
+      stat(placeOf(sha256)).then(
+        () => true,
+        () => false,
+      ),
   };
 }

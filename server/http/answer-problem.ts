@@ -10,13 +10,15 @@ export function answerProblem(deps: Deps): ErrorRequestHandler {
   return async (error: unknown, request, response, _next) => {
     const problem = problemOf(error);
     if (problem.code === 'failed here') request.log.error({ err: error }, 'failed');
-    if (problem.code === 'not allowed' || problem.code === 'request not trusted') await logRefusal(deps, { request, problem });
+    if (problem.code === 'not allowed' || problem.code === 'request not trusted')
+      await logRefusal(deps, { request, problem });
     if (response.headersSent) {
       response.destroy();
       return;
     }
     if (problem.code === 'database away') response.setHeader('retry-after', '5');
-    if (problem.code === 'too many tries') response.setHeader('retry-after', String(problem.data?.seconds ?? 60));
+    if (problem.code === 'too many tries')
+      response.setHeader('retry-after', String(problem.data?.seconds ?? 60));
     const answer: ProblemAnswer = {
       code: problem.code,
       status: problem.status,
@@ -32,7 +34,9 @@ function problemOf(error: unknown): Problem {
   if (error instanceof Problem) return error;
   if (isBodyError(error)) {
     if (error.type === 'entity.too.large') return new Problem('too large', { data: { megabytes: 1 } });
-    return new Problem('not valid', { fields: [{ path: '', message: 'The body is not JSON that can be read' }] });
+    return new Problem('not valid', {
+      fields: [{ path: '', message: 'The body is not JSON that can be read' }],
+    });
   }
   if (isCsrf(error)) return new Problem('request not trusted');
   if (isAway(error)) return new Problem('database away');
@@ -41,7 +45,11 @@ function problemOf(error: unknown): Problem {
 
 function isBodyError(error: unknown): error is { type: string } {
   return (
-    typeof error === 'object' && error !== null && 'type' in error && typeof error.type === 'string' && 'status' in error
+    typeof error === 'object' &&
+    error !== null &&
+    'type' in error &&
+    typeof error.type === 'string' &&
+    'status' in error
   );
 }
 
@@ -49,21 +57,38 @@ function isCsrf(error: unknown): boolean {
   return typeof error === 'object' && error !== null && 'code' in error && error.code === 'EBADCSRFTOKEN';
 }
 
-const awayCodes = new Set(['ECONNREFUSED', 'ECONNRESET', 'ETIMEDOUT', 'EPIPE', 'PROTOCOL_CONNECTION_LOST', 'POOL_CLOSED', 'ER_CON_COUNT_ERROR', 'ENOENT']);
+const awayCodes = new Set([
+  'ECONNREFUSED',
+  'ECONNRESET',
+  'ETIMEDOUT',
+  'EPIPE',
+  'PROTOCOL_CONNECTION_LOST',
+  'POOL_CLOSED',
+  'ER_CON_COUNT_ERROR',
+  'ENOENT',
+]);
 
 function isAway(error: unknown): boolean {
   if (typeof error !== 'object' || error === null) return false;
   if ('code' in error && typeof error.code === 'string' && awayCodes.has(error.code)) return true;
-  if (error instanceof Error && /Queue limit reached|Pool is closed|closed state/.test(error.message)) return true;
+  if (error instanceof Error && /Queue limit reached|Pool is closed|closed state/.test(error.message))
+    return true;
   const number = databaseErrorNumber(error);
   if (number === 1053 || number === 1205 || number === 1021 || number === 1114) return true;
   return 'cause' in error && isAway(error.cause);
 }
 
-async function logRefusal(deps: Deps, { request, problem }: { request: Request; problem: Problem }): Promise<void> {
+async function logRefusal(
+  deps: Deps,
+  { request, problem }: { request: Request; problem: Problem },
+): Promise<void> {
   const at = { requestId: String(request.id), address: request.ip ?? '', now: instantOf(deps.clock) };
   const detail = { method: request.method, path: request.path };
-  await writeLog(deps.db, { at, person: request.person ?? null, action: 'refused', outcome: problem.code, detail }).catch(
-    (error: unknown) => request.log.error({ err: error }, 'refusal not logged'),
-  );
+  await writeLog(deps.db, {
+    at,
+    person: request.person ?? null,
+    action: 'refused',
+    outcome: problem.code,
+    detail,
+  }).catch((error: unknown) => request.log.error({ err: error }, 'refusal not logged'));
 }

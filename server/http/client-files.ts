@@ -10,17 +10,24 @@ const hashed = /-[0-9a-f]{32}\.[a-z0-9]+$/;
 export function clientFiles(folder: string): Router {
   const router = Router();
   const page = path.resolve(folder, 'index.html');
-  router.use('/fonts', express.static(path.resolve('assets/fonts'), { maxAge: '365d', immutable: true, index: false }));
+  router.use(
+    '/fonts',
+    express.static(path.resolve('assets/fonts'), { maxAge: '365d', immutable: true, index: false }),
+  );
   router.use(
     express.static(path.resolve(folder), {
       index: false,
       setHeaders: (response, file) => {
-        response.setHeader('cache-control', hashed.test(file) ? 'public, max-age=31536000, immutable' : 'no-cache');
+        response.setHeader(
+          'cache-control',
+          hashed.test(file) ? 'public, max-age=31536000, immutable' : 'no-cache',
+        );
       },
     }),
   );
   router.get('/{*rest}', (request, response, next) => {
-    if (request.path.startsWith('/api/') || path.extname(request.path) !== '' || !existsSync(page)) return next();
+    if (request.path.startsWith('/api/') || path.extname(request.path) !== '' || !existsSync(page))
+      return next();
     response.setHeader('cache-control', 'no-cache');
     response.sendFile(page);
   });

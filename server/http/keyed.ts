@@ -31,25 +31,23 @@ type Asked = { personId: string; key: string; operation: string; hash: string; n
  * others wait on it: they see its answer after its commit, or take the key if it was rolled back.
  */
 export async function takeKey(tx: Transaction, asked: Asked): Promise<{ answer: unknown } | null> {
-  const [result] = await tx
-    .insert(requests)
-    .ignore()
-    .values({
-      personId: asked.personId,
-      key: asked.key,
-      operation: asked.operation,
-      contentHash: asked.hash,
-      status: 0,
-      answer: null,
-      createdAt: asked.now,
-    });
+  const [result] = await tx.insert(requests).ignore().values({
+    personId: asked.personId,
+    key: asked.key,
+    operation: asked.operation,
+    contentHash: asked.hash,
+    status: 0,
+    answer: null,
+    createdAt: asked.now,
+  });
   if (result.affectedRows === 1) return null;
   const [before] = await tx
     .select()
     .from(requests)
     .where(and(eq(requests.personId, asked.personId), eq(requests.key, asked.key)));
   if (!before) throw new Problem('failed here');
-  if (before.operation !== asked.operation || before.contentHash !== asked.hash) throw new Problem('key used otherwise');
+  if (before.operation !== asked.operation || before.contentHash !== asked.hash)
+    throw new Problem('key used otherwise');
   return { answer: before.answer };
 }
 

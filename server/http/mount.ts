@@ -30,7 +30,14 @@ async function serve(route: Route, exchange: Exchange): Promise<void> {
   const { request, response, deps } = exchange;
   const at = circumstancesOf(exchange);
   if (route.kind === 'open') {
-    const answer = await route.handle({ ...asked(route, request), db: deps.db, deps, at, request, response } as never);
+    const answer = await route.handle({
+      ...asked(route, request),
+      db: deps.db,
+      deps,
+      at,
+      request,
+      response,
+    } as never);
     if (!response.headersSent) response.json(checked(route, answer));
     return;
   }
@@ -65,7 +72,13 @@ async function change(route: Extract<Route, { kind: 'post' }>, scene: Change): P
     const before = route.operation.keyed ? await takeKey(tx, key) : null;
     if (before) return before.answer;
     const answer = await route.handle({ ...call, tx, person, deps, at, files } as never);
-    await writeLog(tx, { at, person, action: route.operation.name, outcome: 'done', subject: subjectOf(route, call, answer) });
+    await writeLog(tx, {
+      at,
+      person,
+      action: route.operation.name,
+      outcome: 'done',
+      subject: subjectOf(route, call, answer),
+    });
     if (route.operation.keyed) await keepAnswer(tx, key, checked(route, answer));
     return answer;
   });
@@ -105,21 +118,31 @@ function circumstancesOf({ request, deps }: Exchange): Circumstances {
 /** Answers pass through their schema: what is not named there never leaves the server. */
 function checked(route: Route, answer: unknown): unknown {
   const result = route.operation.answer.safeParse(answer);
-  if (!result.success) throw new Error(`${route.operation.name} answered what its contract does not say: ${result.error.message}`);
+  if (!result.success)
+    throw new Error(
+      `${route.operation.name} answered what its contract does not say: ${result.error.message}`,
+    );
   return result.data;
 }
 
 function subjectOf(route: Route, call: Asked, answer: unknown): { kind: string; id: string | null } {
-  const fromAnswer = typeof answer === 'object' && answer !== null && 'id' in answer ? String(answer.id) : null;
+  const fromAnswer =
+    typeof answer === 'object' && answer !== null && 'id' in answer ? String(answer.id) : null;
   const params = Object.values((call.params ?? {}) as Record<string, unknown>);
-  return { kind: route.operation.resource, id: fromAnswer ?? (params.length > 0 ? String(params.at(-1)) : null) };
+  return {
+    kind: route.operation.resource,
+    id: fromAnswer ?? (params.length > 0 ? String(params.at(-1)) : null),
+  };
 }
 
 async function sendFile(response: Response, answer: FileAnswer): Promise<void> {
   const how = answer.inline ? 'inline' : 'attachment';
   const plain = answer.name.replace(/[^\x20-\x7e]|["\\]/g, '_');
   response.setHeader('content-type', answer.mediaType);
-  response.setHeader('content-disposition', `${how}; filename="${plain}"; filename*=UTF-8''${encodeURIComponent(answer.name)}`);
+  response.setHeader(
+    'content-disposition',
+    `${how}; filename="${plain}"; filename*=UTF-8''${encodeURIComponent(answer.name)}`,
+  );
   response.setHeader('content-security-policy', "sandbox; default-src 'none'; style-src 'unsafe-inline'");
   response.setHeader('x-content-type-options', 'nosniff');
   response.setHeader('cache-control', 'private, no-store');

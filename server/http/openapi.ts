@@ -3,9 +3,14 @@ import { createDocument, type ZodOpenApiOperationObject, type ZodOpenApiPathsObj
 import { problemAnswer } from '@/shared/problems/problems';
 import type { Route } from './route';
 
-const problem = problemAnswer.meta({ id: 'Problem', description: 'What went wrong: a code of a closed list, with data' });
+const problem = problemAnswer.meta({
+  id: 'Problem',
+  description: 'What went wrong: a code of a closed list, with data',
+});
 const keyHeader = z.object({
-  'Idempotency-Key': z.string().meta({ description: 'Made by the client, kept for retries: the same request has one effect' }),
+  'Idempotency-Key': z
+    .string()
+    .meta({ description: 'Made by the client, kept for retries: the same request has one effect' }),
 });
 
 /** OpenAPI 3.1 from the contracts. */
@@ -28,8 +33,14 @@ export function openApiOf(routes: readonly Route[]) {
 }
 
 function describe(operation: Route['operation'], ability: Route['ability']): ZodOpenApiOperationObject {
-  const form = z.object({ body: z.string().optional(), files: z.array(z.string().meta({ format: 'binary' })) });
-  const sent = operation.sends === 'files' ? { 'multipart/form-data': { schema: form } } : { 'application/json': { schema: operation.body as z.ZodType } };
+  const form = z.object({
+    body: z.string().optional(),
+    files: z.array(z.string().meta({ format: 'binary' })),
+  });
+  const sent =
+    operation.sends === 'files'
+      ? { 'multipart/form-data': { schema: form } }
+      : { 'application/json': { schema: operation.body as z.ZodType } };
   const answered =
     operation.answers === 'file'
       ? { 'application/octet-stream': { schema: z.string().meta({ format: 'binary' }) } }

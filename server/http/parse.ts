@@ -2,7 +2,11 @@ import type { z } from 'zod';
 import { type BadField, Problem } from '@/shared/problems/problems';
 
 /** Parses by schema; all bad fields at once, each by its path within `where`. */
-export function parsed(schema: z.ZodType | undefined, value: unknown, where: 'params' | 'query' | 'body'): unknown {
+export function parsed(
+  schema: z.ZodType | undefined,
+  value: unknown,
+  where: 'params' | 'query' | 'body',
+): unknown {
   if (!schema) return undefined;
   const result = schema.safeParse(value);
   if (result.success) return result.data;
@@ -11,5 +15,7 @@ export function parsed(schema: z.ZodType | undefined, value: unknown, where: 'pa
 }
 
 export function badFieldsOf(error: z.ZodError): BadField[] {
-  return error.issues.slice(0, 200).map((issue) => ({ path: issue.path.map(String).join('.'), message: issue.message }));
+  return error.issues
+    .slice(0, 200)
+    .map((issue) => ({ path: issue.path.map(String).join('.'), message: issue.message }));
 }

@@ -21,16 +21,42 @@ export type PostCall<O> = Parsed<O> & {
   at: Circumstances;
   files: UploadedFile[];
 };
-export type OpenCall<O> = Parsed<O> & { db: Database; deps: Deps; at: Circumstances; request: Request; response: Response };
+export type OpenCall<O> = Parsed<O> & {
+  db: Database;
+  deps: Deps;
+  at: Circumstances;
+  request: Request;
+  response: Response;
+};
 
 export type FileAnswer = { name: string; mediaType: string; content: Buffer | Readable; inline?: boolean };
 
 type AnyOperation = Operation;
 export type Route =
-  | { kind: 'read'; operation: AnyOperation; ability: Ability; handle: (call: ReadCall<never>) => Promise<unknown> }
-  | { kind: 'file'; operation: AnyOperation; ability: Ability; handle: (call: ReadCall<never>) => Promise<FileAnswer> }
-  | { kind: 'post'; operation: AnyOperation; ability: Ability; handle: (call: PostCall<never>) => Promise<unknown> }
-  | { kind: 'open'; operation: AnyOperation; ability: null; handle: (call: OpenCall<never>) => Promise<unknown> };
+  | {
+      kind: 'read';
+      operation: AnyOperation;
+      ability: Ability;
+      handle: (call: ReadCall<never>) => Promise<unknown>;
+    }
+  | {
+      kind: 'file';
+      operation: AnyOperation;
+      ability: Ability;
+      handle: (call: ReadCall<never>) => Promise<FileAnswer>;
+    }
+  | {
+      kind: 'post';
+      operation: AnyOperation;
+      ability: Ability;
+      handle: (call: PostCall<never>) => Promise<unknown>;
+    }
+  | {
+      kind: 'open';
+      operation: AnyOperation;
+      ability: null;
+      handle: (call: OpenCall<never>) => Promise<unknown>;
+    };
 
 /** A question: reads, never writes. */
 export function read<O extends Operation>(

@@ -18,7 +18,10 @@ export function sessions(deps: Deps): RequestHandler {
       clearExpired: false,
       createDatabaseTable: false,
       expiration: config.SESSION_MAX_HOURS * hour,
-      schema: { tableName: 'sessions', columnNames: { session_id: 'session_id', expires: 'expires', data: 'data' } },
+      schema: {
+        tableName: 'sessions',
+        columnNames: { session_id: 'session_id', expires: 'expires', data: 'data' },
+      },
     },
     deps.pool as never,
   );

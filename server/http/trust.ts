@@ -20,7 +20,8 @@ export function fromOwnPages(publicUrl: string): RequestHandler {
     if (origin !== undefined && !own.includes(hostOf(origin))) throw new Problem('request not trusted');
     const site = request.get('sec-fetch-site');
     if (site === 'cross-site' || site === 'same-site') throw new Problem('request not trusted');
-    const sized = Number(request.get('content-length') ?? 0) > 0 || request.get('transfer-encoding') !== undefined;
+    const sized =
+      Number(request.get('content-length') ?? 0) > 0 || request.get('transfer-encoding') !== undefined;
     if (sized && !request.is('application/json') && !request.is('multipart/form-data')) {
       throw new Problem('content not understood');
     }

@@ -9,7 +9,14 @@ export const mostFiles = 6;
 
 const receive = multer({
   storage: multer.memoryStorage(),
-  limits: { fileSize: largestFileBytes, files: mostFiles, fields: 20, fieldSize: 100_000, parts: 30, headerPairs: 20 },
+  limits: {
+    fileSize: largestFileBytes,
+    files: mostFiles,
+    fields: 20,
+    fieldSize: 100_000,
+    parts: 30,
+    headerPairs: 20,
+  },
   defParamCharset: 'utf8',
 }).any();
 
@@ -37,9 +44,13 @@ export function readUpload(request: Request, response: Response): Promise<Upload
 
 function uploadProblem(error: unknown): Problem {
   if (error instanceof MulterError && error.code.startsWith('LIMIT_FILE')) {
-    return new Problem('too large', { data: { megabytes: largestFileBytes / 1024 / 1024, files: mostFiles } });
+    return new Problem('too large', {
+      data: { megabytes: largestFileBytes / 1024 / 1024, files: mostFiles },
+    });
   }
-  return new Problem('not valid', { fields: [{ path: 'files', message: 'The upload broke off or is not a form with files' }] });
+  return new Problem('not valid', {
+    fields: [{ path: 'files', message: 'The upload broke off or is not a form with files' }],
+  });
 }
 
 /** The last part of the name without control characters or path signs, at most 120 characters, its ending kept. */

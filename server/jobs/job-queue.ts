@@ -14,7 +14,14 @@ export type JobHandler = (deps: Deps, job: Job, progress: Progress) => Promise<u
 const leaseMs = 60_000;
 const mostAttempts = 5;
 
-type Asked = { kind: string; payload: unknown; onceKey: string; now: string; companyId?: string; createdBy?: string };
+type Asked = {
+  kind: string;
+  payload: unknown;
+  onceKey: string;
+  now: string;
+  companyId?: string;
+  createdBy?: string;
+};
 
 /** Puts a job in the queue, in the transaction that wants it done. The same onceKey twice is one job. */
 export async function queueJob(tx: Transaction, asked: Asked): Promise<string> {
@@ -42,9 +49,15 @@ export async function runNextJob(deps: Deps, handlers: Record<string, JobHandler
   if (!job) return false;
   const handler = handlers[job.kind];
   const close = (set: Partial<Job>) =>
-    deps.db.update(jobs).set({ ...set, claimedUntil: null }).where(eq(jobs.id, job.id));
+    deps.db
+      .update(jobs)
+      .set({ ...set, claimedUntil: null })
+      .where(eq(jobs.id, job.id));
   const progress: Progress = async (done, total) => {
-    await deps.db.update(jobs).set({ done, total, claimedUntil: leaseFrom(deps) }).where(eq(jobs.id, job.id));
+    await deps.db
+      .update(jobs)
+      .set({ done, total, claimedUntil: leaseFrom(deps) })
+      .where(eq(jobs.id, job.id));
   };
   const beat = setInterval(() => void progressBeat(deps, job.id), leaseMs / 3);
   try {
@@ -55,7 +68,9 @@ export async function runNextJob(deps: Deps, handlers: Record<string, JobHandler
     deps.logger.error({ err: error, job: job.id, kind: job.kind }, 'job failed');
     const problem = (error instanceof Error ? error.message : String(error)).slice(0, 500);
     const last = job.attempts >= mostAttempts;
-    await close(last ? { state: 'failed', problem, endedAt: instantOf(deps.clock) } : { state: 'waiting', problem });
+    await close(
+      last ? { state: 'failed', problem, endedAt: instantOf(deps.clock) } : { state: 'waiting', problem },
+    );
   } finally {
     clearInterval(beat);
   }
@@ -91,7 +106,10 @@ async function claim(deps: Deps): Promise<Job | null> {
       .for('update', { skipLocked: true });
     if (!job) return null;
     const attempts = job.attempts + 1;
-    await tx.update(jobs).set({ state: 'running', attempts, claimedUntil: leaseFrom(deps) }).where(eq(jobs.id, job.id));
+    await tx
+      .update(jobs)
+      .set({ state: 'running', attempts, claimedUntil: leaseFrom(deps) })
+      .where(eq(jobs.id, job.id));
     return { ...job, attempts };
   });
 }

@@ -9,8 +9,13 @@ export async function runDue(deps: Deps, scheduled: readonly Scheduled[]): Promi
   const now = instantOf(deps.clock);
   for (const work of scheduled) {
     const slot = work.every === 'hour' ? now.slice(0, 13) : now.slice(0, 10);
-    const [taken] = await deps.db.insert(scheduleSlots).ignore().values({ name: work.name, slot, takenAt: now });
+    const [taken] = await deps.db
+      .insert(scheduleSlots)
+      .ignore()
+      .values({ name: work.name, slot, takenAt: now });
     if (taken.affectedRows !== 1) continue;
-    await work.run(deps).catch((error: unknown) => deps.logger.error({ err: error, work: work.name }, 'scheduled work failed'));
+    await work
+      .run(deps)
+      .catch((error: unknown) => deps.logger.error({ err: error, work: work.name }, 'scheduled work failed'));
   }
 }

@@ -61,13 +61,24 @@ async function deliver(deps: Deps, { mailer, message }: { mailer: Mailer; messag
       text: message.text,
       messageId: message.messageId,
     });
-    await mark({ state: 'sent', sentAt: instantOf(deps.clock), claimedUntil: null, attempts: message.attempts + 1 });
+    await mark({
+      state: 'sent',
+      sentAt: instantOf(deps.clock),
+      claimedUntil: null,
+      attempts: message.attempts + 1,
+    });
   } catch (error) {
     const attempts = message.attempts + 1;
     const problem = (error instanceof Error ? error.message : String(error)).slice(0, 300);
     const wait = Math.min(3_600_000, 30_000 * 2 ** attempts);
     const notBefore = new Date(deps.clock.now().getTime() + wait).toISOString();
     deps.logger.warn({ err: error, message: message.id }, 'mail not sent');
-    await mark({ state: attempts >= mostAttempts ? 'failed' : 'waiting', attempts, problem, notBefore, claimedUntil: null });
+    await mark({
+      state: attempts >= mostAttempts ? 'failed' : 'waiting',
+      attempts,
+      problem,
+      notBefore,
+      claimedUntil: null,
+    });
   }
 }

@@ -62,7 +62,8 @@ export const askForReset = operation({
   resource: 'session',
   method: 'POST',
   path: '/password-resets',
-  summary: 'Ask for a link to choose a new password; the answer is the same whether or not the address is known',
+  summary:
+    'Ask for a link to choose a new password; the answer is the same whether or not the address is known',
   keyed: false,
   body: z.object({ email }),
   answer: z.object({ sent: z.literal(true) }),

@@ -21,7 +21,8 @@ export class Caller {
   static async signedIn(app: Express, email: string, password = testPassword): Promise<Caller> {
     const caller = await Caller.stranger(app);
     const response = await caller.post('/session', { email, password });
-    if (response.status !== 200) throw new Error(`sign-in of ${email} answered ${response.status} ${response.text}`);
+    if (response.status !== 200)
+      throw new Error(`sign-in of ${email} answered ${response.status} ${response.text}`);
     caller.token = String(response.body.csrfToken);
     return caller;
   }

@@ -25,8 +25,14 @@ export async function aDatabase(label: string): Promise<TestDatabase> {
   const name = `tarekeep_test_${label.replace(/[^a-z0-9]/g, '_')}_${process.pid}_${Date.now().toString(36)}`;
   const url = (user: string, password: string) =>
     `mysql://${user}:${encodeURIComponent(password)}@${server.host}:${server.port}/${name}`;
-  await asOwner(null, (owner) => owner.query(`CREATE DATABASE ${owner.escapeId(name)} CHARACTER SET utf8mb4`));
-  const made = { name, appUrl: url(server.appUser, server.appPassword), ownerUrl: url(server.ownerUser, server.ownerPassword) };
+  await asOwner(null, (owner) =>
+    owner.query(`CREATE DATABASE ${owner.escapeId(name)} CHARACTER SET utf8mb4`),
+  );
+  const made = {
+    name,
+    appUrl: url(server.appUser, server.appPassword),
+    ownerUrl: url(server.ownerUser, server.ownerPassword),
+  };
   await migrateDatabase(made.ownerUrl, made.appUrl);
   return made;
 }

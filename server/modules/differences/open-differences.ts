@@ -13,7 +13,10 @@ type Declared = { typeCode: string; declared: number };
 type Opening = { counted: Counted; counting: Counting; declared: readonly Declared[] };
 
 /** One difference for each type that was counted otherwise than declared; what is within tolerance settles at once. */
-export async function openDifferences(tx: Transaction, { counted, counting, declared }: Opening): Promise<void> {
+export async function openDifferences(
+  tx: Transaction,
+  { counted, counting, declared }: Opening,
+): Promise<void> {
   const said = new Map(declared.map((line) => [line.typeCode, line.declared]));
   const partner = counted.to.company.kind === 'partner' ? counted.to.company : counted.from.company;
   for (const line of counting.lines) {
@@ -21,7 +24,12 @@ export async function openDifferences(tx: Transaction, { counted, counting, decl
     const openUnits = line.counted - expected;
     if (openUnits === 0) continue;
     const id = newId();
-    const worth = { companyId: partner.id, currency: partner.currency, typeCode: line.typeCode, day: counting.countedOn };
+    const worth = {
+      companyId: partner.id,
+      currency: partner.currency,
+      typeCode: line.typeCode,
+      day: counting.countedOn,
+    };
     await tx.insert(differences).values({
       id,
       shipmentId: counted.shipment.id,

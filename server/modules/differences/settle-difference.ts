@@ -37,7 +37,10 @@ export async function settleDifference(tx: Transaction, settling: Settling): Pro
   const scene = await sceneOf(tx, difference, settling);
   const { entry, events, swapped } = await settlementOf(tx, scene);
   const entryId = await postEntry(tx, entry);
-  await recordEvents(tx, events.map((event) => ({ ...event, entryId })));
+  await recordEvents(
+    tx,
+    events.map((event) => ({ ...event, entryId })),
+  );
   await refuseWhatCannotBe(tx, { companyIds: events.map((event) => event.companyId), today: settling.today });
   for (const each of [difference, ...(swapped ? [swapped] : [])]) {
     await reduce(tx, { difference: each, scene, entryId });
@@ -48,7 +51,8 @@ export async function settleDifference(tx: Transaction, settling: Settling): Pro
 async function lockedDifference(tx: Transaction, id: string): Promise<DifferenceRow> {
   const [difference] = await tx.select().from(differences).where(eq(differences.id, id)).for('update');
   if (!difference) throw new Problem('not found');
-  if (difference.state === 'settled') throw new Problem('already settled', { data: { at: difference.settledAt } });
+  if (difference.state === 'settled')
+    throw new Problem('already settled', { data: { at: difference.settledAt } });
   return difference;
 }
 
@@ -59,7 +63,11 @@ export function refuseMoreThanOpen(difference: DifferenceRow, units: number): vo
 }
 
 async function sceneOf(tx: Transaction, difference: DifferenceRow, settling: Settling): Promise<Scene> {
-  const [shipment] = await tx.select().from(shipments).where(eq(shipments.id, difference.shipmentId)).for('update');
+  const [shipment] = await tx
+    .select()
+    .from(shipments)
+    .where(eq(shipments.id, difference.shipmentId))
+    .for('update');
   const [count] = await tx.select().from(counts).where(eq(counts.id, difference.countId));
   if (!shipment || !count) throw new Problem('not found');
   const sites = await sitesById(tx, [shipment.fromSiteId, shipment.toSiteId]);
@@ -75,7 +83,12 @@ async function reduce(tx: Transaction, { difference, scene, entryId }: Reduction
   const { settling } = scene;
   const left = difference.openUnits - Math.sign(difference.openUnits) * settling.units;
   const partner = scene.to.company.kind === 'partner' ? scene.to.company : scene.from.company;
-  const worth = { companyId: partner.id, currency: partner.currency, typeCode: difference.typeCode, day: difference.openedOn };
+  const worth = {
+    companyId: partner.id,
+    currency: partner.currency,
+    typeCode: difference.typeCode,
+    day: difference.openedOn,
+  };
   await tx
     .update(differences)
     .set({
@@ -90,7 +103,8 @@ async function reduce(tx: Transaction, { difference, scene, entryId }: Reduction
     way: settling.way,
     units: settling.units,
     bearerCompanyId: settling.bearerCompanyId ?? null,
-    swappedWithId: difference.id === settling.differenceId ? (settling.swapWithId ?? null) : settling.differenceId,
+    swappedWithId:
+      difference.id === settling.differenceId ? (settling.swapWithId ?? null) : settling.differenceId,
     entryId,
     reason: settling.reason,
     settledBy: settling.personId,

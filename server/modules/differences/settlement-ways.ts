@@ -51,7 +51,9 @@ function entryOf({ settling, difference, shipment }: Scene, moves: readonly Move
 
 function requireFewer({ difference }: Scene): void {
   if (difference.openUnits > 0) {
-    throw new Problem('not valid', { fields: [{ path: 'way', message: 'More came than was declared: nothing is missing' }] });
+    throw new Problem('not valid', {
+      fields: [{ path: 'way', message: 'More came than was declared: nothing is missing' }],
+    });
   }
 }
 
@@ -77,14 +79,29 @@ async function receiverMiscounted(tx: Transaction, scene: Scene): Promise<Settle
     correctsEntryId: countEntry,
   };
   const right = difference.counted + (fewer ? settling.units : -settling.units);
-  return { entry, events: await correctedEvents(tx, { ...scene, by: fewer ? settling.units : -settling.units, right }) };
+  return {
+    entry,
+    events: await correctedEvents(tx, { ...scene, by: fewer ? settling.units : -settling.units, right }),
+  };
 }
 
 /** The entry of the count, or of the shipment's departure where nothing at all was counted. */
-export async function entryOfCount(tx: Transaction, by: { countId: string; shipmentId: string }): Promise<number> {
-  const [counted] = await tx.select({ id: ledgerEntries.id }).from(ledgerEntries).where(and(eq(ledgerEntries.shipmentId, by.shipmentId), eq(ledgerEntries.countId, by.countId))).limit(1);
+export async function entryOfCount(
+  tx: Transaction,
+  by: { countId: string; shipmentId: string },
+): Promise<number> {
+  const [counted] = await tx
+    .select({ id: ledgerEntries.id })
+    .from(ledgerEntries)
+    .where(and(eq(ledgerEntries.shipmentId, by.shipmentId), eq(ledgerEntries.countId, by.countId)))
+    .limit(1);
   if (counted) return counted.id;
-  const [sent] = await tx.select({ id: ledgerEntries.id }).from(ledgerEntries).where(eq(ledgerEntries.shipmentId, by.shipmentId)).orderBy(desc(ledgerEntries.id)).limit(1);
+  const [sent] = await tx
+    .select({ id: ledgerEntries.id })
+    .from(ledgerEntries)
+    .where(eq(ledgerEntries.shipmentId, by.shipmentId))
+    .orderBy(desc(ledgerEntries.id))
+    .limit(1);
   if (!sent) throw new Problem('not found');
   return sent.id;
 }
@@ -111,16 +128,27 @@ export async function correctedEvents(tx: Transaction, scene: Correcting): Promi
     );
   const cause = `count of ${shipment.reference} put right to ${right}`;
   return sidesOf(scene).map(({ companyId, kind }) => {
-    const event = { companyId, date: count.countedOn, typeCode: difference.typeCode, shipmentId: shipment.id, countId: count.id, cause };
+    const event = {
+      companyId,
+      date: count.countedOn,
+      typeCode: difference.typeCode,
+      shipmentId: shipment.id,
+      countId: count.id,
+      cause,
+    };
     const named = held.find((row) => row.companyId === companyId && row.kind === kind);
     if (named) return { ...event, kind: 'corrected' as const, quantity: by, correctsId: named.id };
-    if (by < 0) throw new Problem('cannot be reckoned', { data: { why: 'a count cannot be put right below zero' } });
+    if (by < 0)
+      throw new Problem('cannot be reckoned', { data: { why: 'a count cannot be put right below zero' } });
     return { ...event, kind, quantity: by };
   });
 }
 
 /** Which partners a count concerns, and how (RULES 2). */
-export function sidesOf({ from, to }: Pick<Scene, 'from' | 'to'>): { companyId: string; kind: 'issued' | 'returned' }[] {
+export function sidesOf({
+  from,
+  to,
+}: Pick<Scene, 'from' | 'to'>): { companyId: string; kind: 'issued' | 'returned' }[] {
   return [
     ...(to.company.kind === 'partner' ? [{ companyId: to.companyId, kind: 'issued' as const }] : []),
     ...(from.company.kind === 'partner' ? [{ companyId: from.companyId, kind: 'returned' as const }] : []),
@@ -132,7 +160,10 @@ async function lostOnTheWay(tx: Transaction, scene: Scene): Promise<Settlement> 
   requireFewer(scene);
   const { difference, settling, shipment, from, to } = scene;
   const bearer = [from.company, to.company].find((company) => company.id === settling.bearerCompanyId);
-  if (!bearer) throw new Problem('not valid', { fields: [{ path: 'bearerCompanyId', message: 'Say who bears the loss: sender or receiver' }] });
+  if (!bearer)
+    throw new Problem('not valid', {
+      fields: [{ path: 'bearerCompanyId', message: 'Say who bears the loss: sender or receiver' }],
+    });
   const event = (companyId: string, kind: 'issued' | 'returned' | 'lost'): PartnerEvent => ({
     companyId,
     kind,
@@ -145,10 +176,14 @@ async function lostOnTheWay(tx: Transaction, scene: Scene): Promise<Settlement> 
   const receiverBears = bearer.id === to.companyId && bearer.kind === 'partner';
   const events = [
     ...(receiverBears ? [event(to.companyId, 'issued'), event(to.companyId, 'lost')] : []),
-    ...(from.company.kind === 'partner' ? [event(from.companyId, bearer.id === from.companyId ? 'lost' : 'returned')] : []),
+    ...(from.company.kind === 'partner'
+      ? [event(from.companyId, bearer.id === from.companyId ? 'lost' : 'returned')]
+      : []),
   ];
   const move = { typeCode: difference.typeCode, units: settling.units, chargedCompanyId: bearer.id };
-  const entry = entryOf(scene, [{ ...move, from: await transitAccount(tx, shipment), to: await outsideAccount(tx, 'lost') }]);
+  const entry = entryOf(scene, [
+    { ...move, from: await transitAccount(tx, shipment), to: await outsideAccount(tx, 'lost') },
+  ]);
   return { entry, events };
 }
 
@@ -157,7 +192,10 @@ async function turnedUpLater(tx: Transaction, scene: Scene): Promise<Settlement>
   requireFewer(scene);
   const { difference, settling, shipment, from, to } = scene;
   const countId = newId();
-  const [last] = await tx.select({ sequence: max(counts.sequence) }).from(counts).where(eq(counts.shipmentId, shipment.id));
+  const [last] = await tx
+    .select({ sequence: max(counts.sequence) })
+    .from(counts)
+    .where(eq(counts.shipmentId, shipment.id));
   await tx.insert(counts).values({
     id: countId,
     shipmentId: shipment.id,
@@ -168,9 +206,13 @@ async function turnedUpLater(tx: Transaction, scene: Scene): Promise<Settlement>
     countedBy: settling.personId,
     countedAt: settling.now,
   });
-  await tx.insert(countLines).values({ countId, typeCode: difference.typeCode, counted: settling.units, damaged: 0, dirty: 0 });
+  await tx
+    .insert(countLines)
+    .values({ countId, typeCode: difference.typeCode, counted: settling.units, damaged: 0, dirty: 0 });
   const move = { typeCode: difference.typeCode, units: settling.units };
-  const entry = entryOf(scene, [{ ...move, from: await transitAccount(tx, shipment), to: await siteAccount(tx, to) }]);
+  const entry = entryOf(scene, [
+    { ...move, from: await transitAccount(tx, shipment), to: await siteAccount(tx, to) },
+  ]);
   const events = sidesOf({ from, to }).map(({ companyId, kind }) => ({
     companyId,
     kind,
@@ -207,7 +249,12 @@ async function swappedDifference(tx: Transaction, { difference, settling }: Scen
     Math.sign(other.openUnits) === -Math.sign(difference.openUnits);
   if (!other || !fits) {
     throw new Problem('not valid', {
-      fields: [{ path: 'swapWithId', message: 'Choose the other type of this shipment: missing here, too many there' }],
+      fields: [
+        {
+          path: 'swapWithId',
+          message: 'Choose the other type of this shipment: missing here, too many there',
+        },
+      ],
     });
   }
   refuseMoreThanOpen(other, settling.units);

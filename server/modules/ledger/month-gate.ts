@@ -20,6 +20,8 @@ export async function refuseClosedMonth(tx: Transaction, valueDate: string): Pro
 
 async function stateOf(tx: Transaction, month: string): Promise<string | undefined> {
   // MariaDB has no FOR SHARE.
-  const [rows] = await tx.execute(sql`select state from ${months} where ${months.month} = ${month} lock in share mode`);
+  const [rows] = await tx.execute(
+    sql`select state from ${months} where ${months.month} = ${month} lock in share mode`,
+  );
   return (rows as unknown as { state: string }[])[0]?.state;
 }

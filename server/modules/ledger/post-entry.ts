@@ -47,7 +47,10 @@ export async function postEntry(tx: Transaction, entry: Entry): Promise<number> 
 type Change = { accountId: number; typeCode: string; by: number };
 
 /** Rows are written in sorted order: sessions that meet wait for each other instead of deadlocking. */
-async function keepBalances(tx: Transaction, { moves, day }: { moves: readonly Move[]; day: string }): Promise<void> {
+async function keepBalances(
+  tx: Transaction,
+  { moves, day }: { moves: readonly Move[]; day: string },
+): Promise<void> {
   const changes = netChanges(moves);
   if (changes.length === 0) return;
   await tx

@@ -17,5 +17,9 @@ export async function eventsOf(db: Reader, companyId: string) {
     .from(partnerEvents)
     .where(eq(partnerEvents.companyId, companyId))
     .orderBy(asc(partnerEvents.id));
-  return rows.map((row) => ({ ...row, id: String(row.id), correctsId: row.correctsId === null ? null : String(row.correctsId) }));
+  return rows.map((row) => ({
+    ...row,
+    id: String(row.id),
+    correctsId: row.correctsId === null ? null : String(row.correctsId),
+  }));
 }

@@ -3,9 +3,33 @@
  * obvious choices, and joined with what belongs to the person: it is short, and says so.
  */
 const common = new Set([
-  'password', 'password1', 'passw0rd', '12345678', '123456789', '1234567890', '11111111', '00000000', 'qwertyui',
-  'qwertyuiop', 'qwerty123', 'iloveyou', 'sunshine', 'princess', 'football', 'baseball', 'letmein1', 'welcome1',
-  'abcdefgh', 'abcd1234', 'asdfghjk', 'administrator', 'changeme', 'trustno1', 'whatever', 'computer', 'tarekeep',
+  'password',
+  'password1',
+  'passw0rd',
+  '12345678',
+  '123456789',
+  '1234567890',
+  '11111111',
+  '00000000',
+  'qwertyui',
+  'qwertyuiop',
+  'qwerty123',
+  'iloveyou',
+  'sunshine',
+  'princess',
+  'football',
+  'baseball',
+  'letmein1',
+  'welcome1',
+  'abcdefgh',
+  'abcd1234',
+  'asdfghjk',
+  'administrator',
+  'changeme',
+  'trustno1',
+  'whatever',
+  'computer',
+  'tarekeep',
 ]);
 
 export function isTooCommon(password: string, own: readonly string[]): boolean {

@@ -61,7 +61,9 @@ export function sessionRoutes(limits: Limits): Route[] {
       await useTry(limits.links, `password:${person.id}`);
       await checkOwn(db, { personId: person.id, current: body.current });
       refuseCommon(body.password, [person.email, person.name]);
-      await inTransaction(db, (tx) => setPassword(tx, { personId: person.id, password: body.password, now: at.now }));
+      await inTransaction(db, (tx) =>
+        setPassword(tx, { personId: person.id, password: body.password, now: at.now }),
+      );
       await begin(request, { personId: person.id, now: at.now });
       await writeLog(db, { at, person, action: 'changePassword', outcome: 'done' });
       return { csrfToken: csrfTokenOf(request, true) };
@@ -92,7 +94,10 @@ async function checkPassword({ email, password, db, limits, at }: Attempt) {
   return person;
 }
 
-async function checkOwn(db: Database, { personId, current }: { personId: string; current: string }): Promise<void> {
+async function checkOwn(
+  db: Database,
+  { personId, current }: { personId: string; current: string },
+): Promise<void> {
   const [row] = await db.select().from(people).where(eq(people.id, personId));
   if (!(await passwordFits(row?.passwordHash ?? null, current))) {
     throw new Problem('not valid', { fields: [{ path: 'current', message: 'This is not your password' }] });
@@ -101,7 +106,9 @@ async function checkOwn(db: Database, { personId, current }: { personId: string;
 
 function refuseCommon(password: string, own: readonly string[]): void {
   if (isTooCommon(password, own)) {
-    throw new Problem('not valid', { fields: [{ path: 'password', message: 'Too easy to guess. Choose another' }] });
+    throw new Problem('not valid', {
+      fields: [{ path: 'password', message: 'Too easy to guess. Choose another' }],
+    });
   }
 }
 

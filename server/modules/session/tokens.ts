@@ -40,7 +40,13 @@ export async function choosePasswordBy(
   const [held] = await tx
     .select()
     .from(personTokens)
-    .where(and(eq(personTokens.tokenHash, hashOf(token)), isNull(personTokens.usedAt), gt(personTokens.expiresAt, now)))
+    .where(
+      and(
+        eq(personTokens.tokenHash, hashOf(token)),
+        isNull(personTokens.usedAt),
+        gt(personTokens.expiresAt, now),
+      ),
+    )
     .for('update');
   if (!held) throw new Problem('link not valid');
   await tx.update(personTokens).set({ usedAt: now }).where(eq(personTokens.id, held.id));

@@ -35,7 +35,10 @@ export async function countShipment(tx: Transaction, counting: Counting): Promis
   const shipment = await lockedShipment(tx, counting.shipmentId);
   const declared = await tx.select().from(shipmentLines).where(eq(shipmentLines.shipmentId, shipment.id));
   refuseImpossible(counting, { shipment, declared });
-  await refuseUnknownTypes(tx, counting.lines.map((line) => line.typeCode));
+  await refuseUnknownTypes(
+    tx,
+    counting.lines.map((line) => line.typeCode),
+  );
   const sites = await sitesById(tx, [shipment.fromSiteId, shipment.toSiteId]);
   const from = sites.get(shipment.fromSiteId);
   const to = sites.get(shipment.toSiteId);
@@ -45,7 +48,12 @@ export async function countShipment(tx: Transaction, counting: Counting): Promis
   await postCount(tx, { counting, counted });
   await tx
     .update(shipments)
-    .set({ state: 'counted', countedAt: counting.now, countedOn: counting.countedOn, countedBy: counting.personId })
+    .set({
+      state: 'counted',
+      countedAt: counting.now,
+      countedOn: counting.countedOn,
+      countedBy: counting.personId,
+    })
     .where(eq(shipments.id, shipment.id));
   await openDifferences(tx, { counted, counting, declared });
   return counted;
@@ -64,17 +72,25 @@ async function lockedShipment(tx: Transaction, id: string): Promise<Shipment> {
 
 type Declared = { typeCode: string; declared: number };
 
-function refuseImpossible(counting: Counting, { shipment, declared }: { shipment: Shipment; declared: Declared[] }): void {
+function refuseImpossible(
+  counting: Counting,
+  { shipment, declared }: { shipment: Shipment; declared: Declared[] },
+): void {
   const fields: BadField[] = [];
-  if (counting.countedOn < shipment.leftOn) fields.push({ path: 'countedOn', message: 'Before the day it left' });
+  if (counting.countedOn < shipment.leftOn)
+    fields.push({ path: 'countedOn', message: 'Before the day it left' });
   const types = counting.lines.map((line) => line.typeCode);
   counting.lines.forEach((line, index) => {
-    if (types.indexOf(line.typeCode) !== index) fields.push({ path: `lines.${index}.typeCode`, message: 'The same type twice' });
-    if (line.damaged > line.counted) fields.push({ path: `lines.${index}.damaged`, message: 'More damaged than counted' });
-    if (line.dirty > line.counted) fields.push({ path: `lines.${index}.dirty`, message: 'More to clean than counted' });
+    if (types.indexOf(line.typeCode) !== index)
+      fields.push({ path: `lines.${index}.typeCode`, message: 'The same type twice' });
+    if (line.damaged > line.counted)
+      fields.push({ path: `lines.${index}.damaged`, message: 'More damaged than counted' });
+    if (line.dirty > line.counted)
+      fields.push({ path: `lines.${index}.dirty`, message: 'More to clean than counted' });
   });
   for (const line of declared) {
-    if (!types.includes(line.typeCode)) fields.push({ path: 'lines', message: `${line.typeCode} is not counted yet` });
+    if (!types.includes(line.typeCode))
+      fields.push({ path: 'lines', message: `${line.typeCode} is not counted yet` });
   }
   if (fields.length > 0) throw new Problem('not valid', { fields });
 }
@@ -91,9 +107,11 @@ async function insertCount(tx: Transaction, counting: Counting): Promise<string>
     countedBy: counting.personId,
     countedAt: counting.now,
   });
-  if (counting.lines.length > 0) await tx.insert(countLines).values(counting.lines.map((line) => ({ countId: id, ...line })));
+  if (counting.lines.length > 0)
+    await tx.insert(countLines).values(counting.lines.map((line) => ({ countId: id, ...line })));
   const photos = counting.photoIds ?? [];
-  if (photos.length > 0) await tx.insert(countPhotos).values(photos.map((fileId) => ({ countId: id, fileId })));
+  if (photos.length > 0)
+    await tx.insert(countPhotos).values(photos.map((fileId) => ({ countId: id, fileId })));
   return id;
 }
 
@@ -113,13 +131,20 @@ async function postCount(tx: Transaction, { counting, counted }: Posting): Promi
     shipmentId: shipment.id,
     countId: counted.id,
   });
-  await recordEvents(tx, arrived.flatMap((line) => eventsOfLine(line, { counting, counted, entryId })));
+  await recordEvents(
+    tx,
+    arrived.flatMap((line) => eventsOfLine(line, { counting, counted, entryId })),
+  );
 }
 
 /** RULES 2: issued to a partner that receives, returned by a partner that sent; one of each between two partners. */
 function eventsOfLine(line: CountedLine, { counting, counted, entryId }: Posting & { entryId: number }) {
   const { from, to, shipment } = counted;
-  const event = (companyId: string, kind: 'issued' | 'returned' | 'damaged' | 'cleaned', quantity: number) => ({
+  const event = (
+    companyId: string,
+    kind: 'issued' | 'returned' | 'damaged' | 'cleaned',
+    quantity: number,
+  ) => ({
     companyId,
     date: counting.countedOn,
     typeCode: line.typeCode,

@@ -31,7 +31,10 @@ export type Sent = { id: string; reference: string; from: SiteWithCompany; to: S
 /** A shipment leaves with its declared lines: units go from the sender's site into transit (RULES 1). */
 export async function sendShipment(tx: Transaction, sending: Sending): Promise<Sent> {
   const { from, to } = await checkedSites(tx, sending);
-  await refuseUnknownTypes(tx, sending.lines.map((line) => line.typeCode));
+  await refuseUnknownTypes(
+    tx,
+    sending.lines.map((line) => line.typeCode),
+  );
   const id = newId();
   const reference = sending.reference ?? (await nextReference(tx, sending));
   await insertShipment(tx, { id, reference, sending, from, to });
@@ -43,7 +46,12 @@ export async function sendShipment(tx: Transaction, sending: Sending): Promise<S
     await postEntry(tx, {
       kind: 'sent',
       valueDate: sending.leftOn,
-      moves: declared.map((line) => ({ typeCode: line.typeCode, from: account, to: transit, units: line.declared })),
+      moves: declared.map((line) => ({
+        typeCode: line.typeCode,
+        from: account,
+        to: transit,
+        units: line.declared,
+      })),
       personId: sending.personId,
       shipmentId: id,
     });
@@ -86,11 +94,14 @@ async function checkedSites(tx: Transaction, sending: Sending) {
   const fields: BadField[] = [];
   if (!from?.active) fields.push({ path: 'fromSiteId', message: 'No such site' });
   if (!to?.active) fields.push({ path: 'toSiteId', message: 'No such site' });
-  if (sending.fromSiteId === sending.toSiteId) fields.push({ path: 'toSiteId', message: 'The same site as the sender' });
-  if (sending.expectedOn < sending.leftOn) fields.push({ path: 'expectedOn', message: 'Before the day it leaves' });
+  if (sending.fromSiteId === sending.toSiteId)
+    fields.push({ path: 'toSiteId', message: 'The same site as the sender' });
+  if (sending.expectedOn < sending.leftOn)
+    fields.push({ path: 'expectedOn', message: 'Before the day it leaves' });
   const types = sending.lines.map((line) => line.typeCode);
   types.forEach((type, index) => {
-    if (types.indexOf(type) !== index) fields.push({ path: `lines.${index}.typeCode`, message: 'The same type twice' });
+    if (types.indexOf(type) !== index)
+      fields.push({ path: `lines.${index}.typeCode`, message: 'The same type twice' });
   });
   if (fields.length > 0 || !from || !to) throw new Problem('not valid', { fields });
   return { from, to };
@@ -99,7 +110,10 @@ async function checkedSites(tx: Transaction, sending: Sending) {
 /** Names every line whose container type is not known. */
 export async function refuseUnknownTypes(tx: Transaction, codes: readonly string[]): Promise<void> {
   if (codes.length === 0) return;
-  const known = await tx.select({ code: containerTypes.code }).from(containerTypes).where(inArray(containerTypes.code, [...codes]));
+  const known = await tx
+    .select({ code: containerTypes.code })
+    .from(containerTypes)
+    .where(inArray(containerTypes.code, [...codes]));
   const names = new Set(known.map((type) => type.code));
   const fields = codes.flatMap((code, index) =>
     names.has(code) ? [] : [{ path: `lines.${index}.typeCode`, message: `No container type ${code}` }],

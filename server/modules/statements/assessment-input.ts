@@ -9,8 +9,14 @@ type Asked = { partner: typeof companies.$inferSelect; from: string; to: string 
 
 /** All the events known of a partner, its terms and types, in the form of RULES 3. */
 export async function assessmentInput(db: Reader, { partner, from, to }: Asked): Promise<AssessmentInput> {
-  const versions = await db.select().from(terms).where(eq(terms.companyId, partner.id)).orderBy(asc(terms.validFrom));
-  const types = await db.select({ code: containerTypes.code, inServiceFrom: containerTypes.inServiceFrom }).from(containerTypes);
+  const versions = await db
+    .select()
+    .from(terms)
+    .where(eq(terms.companyId, partner.id))
+    .orderBy(asc(terms.validFrom));
+  const types = await db
+    .select({ code: containerTypes.code, inServiceFrom: containerTypes.inServiceFrom })
+    .from(containerTypes);
   const events = await eventsOf(db, partner.id);
   return {
     currency: partner.currency,
@@ -33,8 +39,16 @@ export async function assessmentInput(db: Reader, { partner, from, to }: Asked):
     containerTypes: types,
     events: events.map((event) => {
       const { id, date, quantity } = event;
-      if (event.kind !== 'corrected') return { id, date, containerType: event.typeCode, kind: event.kind, quantity };
-      return { id, date, containerType: event.typeCode, kind: 'corrected' as const, quantity, corrects: event.correctsId ?? '' };
+      if (event.kind !== 'corrected')
+        return { id, date, containerType: event.typeCode, kind: event.kind, quantity };
+      return {
+        id,
+        date,
+        containerType: event.typeCode,
+        kind: 'corrected' as const,
+        quantity,
+        corrects: event.correctsId ?? '',
+      };
     }),
   };
 }

@@ -12,7 +12,13 @@ export async function termsInForce(
   const [held] = await db
     .select()
     .from(terms)
-    .where(and(eq(terms.companyId, asked.companyId), eq(terms.typeCode, asked.typeCode), lte(terms.validFrom, asked.day)))
+    .where(
+      and(
+        eq(terms.companyId, asked.companyId),
+        eq(terms.typeCode, asked.typeCode),
+        lte(terms.validFrom, asked.day),
+      ),
+    )
     .orderBy(desc(terms.validFrom))
     .limit(1);
   return held;

@@ -6,10 +6,18 @@ import { statements } from '@/db/schema/statements';
 import { may, type Person, scopeOf } from '../../http/person';
 
 /** How much waits for this person in each place; places where nothing waits are left out. */
-export async function waitingFor(db: Reader, person: Person, _today: string): Promise<Record<string, number>> {
+export async function waitingFor(
+  db: Reader,
+  person: Person,
+  _today: string,
+): Promise<Record<string, number>> {
   const scope = scopeOf(person);
   const waiting: Record<string, number> = {};
-  const put = async (place: string, wanted: boolean, number: () => Promise<{ n: number }[]>): Promise<void> => {
+  const put = async (
+    place: string,
+    wanted: boolean,
+    number: () => Promise<{ n: number }[]>,
+  ): Promise<void> => {
     if (!wanted) return;
     const n = (await number())[0]?.n ?? 0;
     if (n > 0) waiting[place] = n;
@@ -37,7 +45,13 @@ export async function waitingFor(db: Reader, person: Person, _today: string): Pr
     db
       .select({ n: count() })
       .from(statements)
-      .where(and(eq(statements.companyId, person.companyId), eq(statements.state, 'issued'), eq(statements.answer, 'awaited'))),
+      .where(
+        and(
+          eq(statements.companyId, person.companyId),
+          eq(statements.state, 'issued'),
+          eq(statements.answer, 'awaited'),
+        ),
+      ),
   );
   return waiting;
 }

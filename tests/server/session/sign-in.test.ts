@@ -23,7 +23,10 @@ describe('signing in', () => {
     const clerk = await product.aPerson(partner, ['clerk']);
     const stranger = await product.stranger();
     const wrong = await stranger.post('/session', { email: clerk.email, password: 'not the password' });
-    const unknown = await stranger.post('/session', { email: 'nobody@tarekeep.example', password: 'not the password' });
+    const unknown = await stranger.post('/session', {
+      email: 'nobody@tarekeep.example',
+      password: 'not the password',
+    });
     expect([wrong.status, unknown.status]).toEqual([401, 401]);
     expect({ ...wrong.body, requestId: '' }).toEqual({ ...unknown.body, requestId: '' });
   });
@@ -31,7 +34,10 @@ describe('signing in', () => {
   it('refuses a changing request without the token', async () => {
     const stranger = await product.stranger();
     stranger.token = 'x';
-    const response = await stranger.post('/session', { email: 'a@tarekeep.example', password: 'whatever it is' });
+    const response = await stranger.post('/session', {
+      email: 'a@tarekeep.example',
+      password: 'whatever it is',
+    });
     expect(response.status).toBe(403);
     expect(response.body.code).toBe('request not trusted');
   });
@@ -50,8 +56,12 @@ describe('signing in', () => {
     const clerk = await product.aPerson(partner, ['clerk']);
     const stranger = await product.stranger();
     for (let attempt = 1; attempt <= 10; attempt += 1) {
-      expect((await stranger.post('/session', { email: clerk.email, password: `wrong ${attempt}` })).status).toBe(401);
+      expect(
+        (await stranger.post('/session', { email: clerk.email, password: `wrong ${attempt}` })).status,
+      ).toBe(401);
     }
-    expect((await stranger.post('/session', { email: clerk.email, password: 'wrong again' })).status).toBe(429);
+    expect((await stranger.post('/session', { email: clerk.email, password: 'wrong again' })).status).toBe(
+      429,
+    );
   });
 });
