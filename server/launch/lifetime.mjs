@@ -1,16 +1,18 @@
 import { watchNpm } from './npm-parent.mjs';
 
-/** @type {(() => unknown)[]} */
-const closers = [];
+/** @type {Set<() => unknown>} */
+const closers = new Set();
 /** @type {Promise<never> | undefined} */
 let ending;
 
 /**
  * Remembers what has to be undone at the end; the last is undone first.
  * @param {() => unknown} close
+ * @returns {() => void} forgets it again
  */
 export function atEnd(close) {
-  closers.push(close);
+  closers.add(close);
+  return () => closers.delete(close);
 }
 
 /** Whether the program is on its way out, so that failures of what it ends are no news. */
@@ -25,7 +27,7 @@ export function isEnding() {
  */
 export function end(code) {
   ending ??= (async () => {
-    for (const close of closers.reverse()) {
+    for (const close of [...closers].reverse()) {
       try {
         await close();
       } catch (error) {

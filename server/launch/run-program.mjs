@@ -2,10 +2,6 @@ import { spawn } from 'node:child_process';
 import { endProcess } from '../../db/local/running-process.mjs';
 import { atEnd } from './lifetime.mjs';
 
-/** @type {Set<import('node:child_process').ChildProcess>} */
-const running = new Set();
-atEnd(() => Promise.all([...running].map((child) => endProcess(child.pid ?? 0, 5_000))));
-
 /**
  * Runs a program to its end, quietly: its output is shown when it fails.
  * @param {string} program
@@ -31,7 +27,7 @@ export function tryProgram(program, args, { env, shown = false, limit } = {}) {
     env: { ...process.env, ...env },
     stdio: shown ? ['ignore', 'inherit', 'inherit'] : ['ignore', 'pipe', 'pipe'],
   });
-  running.add(child);
+  const forget = atEnd(() => endProcess(child.pid ?? 0, 5_000));
   const timer = limit && setTimeout(() => void endProcess(child.pid ?? 0, 5_000), limit);
   let output = '';
   for (const stream of [child.stdout, child.stderr]) {
@@ -40,7 +36,7 @@ export function tryProgram(program, args, { env, shown = false, limit } = {}) {
   return new Promise((resolve, reject) => {
     child.once('error', reject);
     child.once('close', (code, signal) => {
-      running.delete(child);
+      forget();
       clearTimeout(timer);
       resolve({ code, signal, output });
     });
