@@ -1,0 +1,33 @@
+import { useId } from 'react';
+import { FieldGroup, type FieldProps } from './Field';
+import type { Option } from './Select';
+
+type ChoiceProps<Value extends string> = FieldProps & {
+  value: Value | '';
+  onChange: (value: Value) => void;
+  options: readonly Option<Value>[];
+};
+
+/** One of a few, all in sight. */
+export function Choice<Value extends string>({ value, onChange, options, ...field }: ChoiceProps<Value>) {
+  const made = useId();
+  const group = field.id ?? made;
+  return (
+    <FieldGroup {...field} id={group}>
+      <div className="tk-choice">
+        {options.map((option) => (
+          <label key={option.value}>
+            <input
+              type="radio"
+              name={group}
+              value={option.value}
+              checked={value === option.value}
+              onChange={() => onChange(option.value)}
+            />
+            {option.label}
+          </label>
+        ))}
+      </div>
+    </FieldGroup>
+  );
+}
