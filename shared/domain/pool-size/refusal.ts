@@ -5,6 +5,7 @@ export type SizingRefusal =
   | 'no time in the loop'
   | 'no unit left to use'
   | 'loop time spreads too widely'
+  | 'no whole containers a day'
   | 'figures too large';
 
 /** What cannot be sized: the code to act on, and where in the input it was found. */
