@@ -1,6 +1,7 @@
 import { index, int, mysqlTable, primaryKey, uniqueIndex, varchar } from 'drizzle-orm/mysql-core';
 import { code, day, id, instant, json, units } from '../columns';
 import { companies, people, sites } from './companies';
+import { shipments } from './shipments';
 
 /** Messages to send, written in the transaction that causes them. Delivered at least once, under one Message-ID. */
 export const outbox = mysqlTable(
@@ -77,8 +78,15 @@ export const imports = mysqlTable(
     rowsGood: int('rows_good').notNull(),
     rowsBad: int('rows_bad').notNull(),
     jobId: id('job_id'),
-    /** Counts of matches by rule, duplicates, leftovers. */
+    /** How far the posting has come; what is behind it is never done again. */
+    phase: varchar('phase', { length: 12 }).$type<'read' | 'planned' | 'posted'>().notNull().default('read'),
+    /** What the preview shows in sums. */
+    totals: json('totals'),
+    /** How the shipments of the book stood when the receipts were compared with them. */
     result: json('result'),
+    confirmedBy: id('confirmed_by').references(() => people.id),
+    confirmedAt: instant('confirmed_at'),
+    endedAt: instant('ended_at'),
     createdBy: id('created_by').references(() => people.id),
     createdAt: instant('created_at').notNull(),
   },
@@ -103,6 +111,28 @@ export const importRows = mysqlTable(
   ],
 );
 
+/** What became of each shipment and receipt of a file; the row is the mark that it has been dealt with. */
+export const importDocuments = mysqlTable(
+  'import_documents',
+  {
+    importId: id('import_id')
+      .notNull()
+      .references(() => imports.id),
+    /** The first row of the document. */
+    rowNo: int('row_no').notNull(),
+    side: varchar('side', { length: 8 }).$type<'shipment' | 'receipt'>().notNull(),
+    reference: varchar('reference', { length: 120 }),
+    outcome: varchar('outcome', { length: 10 }).$type<'posted' | 'known' | 'refused'>().notNull(),
+    shipmentId: id('shipment_id').references(() => shipments.id),
+    /** Why it was refused: { code, data } of a problem. */
+    problem: json('problem'),
+  },
+  (table) => [
+    primaryKey({ columns: [table.importId, table.rowNo] }),
+    index('import_documents_outcome').on(table.importId, table.side, table.outcome, table.rowNo),
+  ],
+);
+
 /** A receipt from a file: matched at once, offered for a match, or left as unannounced. */
 export const receipts = mysqlTable(
   'receipts',
@@ -120,15 +150,18 @@ export const receipts = mysqlTable(
       .references(() => sites.id),
     countedOn: day('counted_on').notNull(),
     state: varchar('state', { length: 12 })
-      .$type<'matched' | 'duplicate' | 'unannounced' | 'booked'>()
+      .$type<'waiting' | 'matched' | 'duplicate' | 'unannounced' | 'booked'>()
       .notNull(),
+    /** The first row of it in the file. */
+    rowNo: int('row_no').notNull(),
     rule: varchar('rule', { length: 24 }),
     duplicateOf: id('duplicate_of'),
     createdAt: instant('created_at').notNull(),
   },
   (table) => [
     index('receipts_state').on(table.state, table.countedOn, table.id),
-    index('receipts_import').on(table.importId),
+    uniqueIndex('receipts_row').on(table.importId, table.rowNo),
+    index('receipts_import').on(table.importId, table.state, table.id),
   ],
 );
 
@@ -140,29 +173,44 @@ export const receiptLines = mysqlTable(
       .references(() => receipts.id),
     typeCode: code('type_code', { length: 20 }).notNull(),
     counted: units('counted').notNull(),
+    damaged: units('damaged').notNull().default(0),
+    dirty: units('dirty').notNull().default(0),
   },
   (table) => [primaryKey({ columns: [table.receiptId, table.typeCode] })],
 );
 
-/** Which shipments a receipt was matched to, or is offered for. */
+/** Which shipments a receipt was matched to, or is offered for. Rows with one group belong together. */
 export const receiptMatches = mysqlTable(
   'receipt_matches',
   {
     id: id('id').primaryKey(),
+    /** The import whose comparison found it; not always the one that brought the receipt. */
+    importId: id('import_id')
+      .notNull()
+      .references(() => imports.id),
+    groupId: id('group_id').notNull(),
     receiptId: id('receipt_id')
       .notNull()
       .references(() => receipts.id),
-    shipmentId: id('shipment_id').notNull(),
-    state: varchar('state', { length: 10 }).$type<'matched' | 'offered' | 'accepted' | 'refused'>().notNull(),
+    shipmentId: id('shipment_id')
+      .notNull()
+      .references(() => shipments.id),
+    state: varchar('state', { length: 10 })
+      .$type<'planned' | 'matched' | 'not posted' | 'offered' | 'accepted' | 'refused' | 'fell away'>()
+      .notNull(),
     rule: varchar('rule', { length: 24 }).notNull(),
     /** Thousandths, 0 to 1000. */
     score: int('score').notNull(),
-    why: varchar('why', { length: 300 }).notNull(),
+    why: varchar('why', { length: 400 }).notNull(),
+    /** Why a match was not posted: { code, data } of a problem. */
+    problem: json('problem'),
     decidedBy: id('decided_by').references(() => people.id),
     decidedAt: instant('decided_at'),
   },
   (table) => [
     index('receipt_matches_receipt').on(table.receiptId),
-    index('receipt_matches_state').on(table.state, table.id),
+    index('receipt_matches_shipment').on(table.shipmentId),
+    index('receipt_matches_group').on(table.groupId),
+    index('receipt_matches_import').on(table.importId, table.state, table.rule, table.groupId),
   ],
 );
