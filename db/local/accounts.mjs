@@ -35,14 +35,16 @@ function newPassword() {
  * SQL that MariaDB runs at each start, before it lets anyone in. It leaves three accounts: root over the
  * socket; the owner, who migrates; the application, which may do nothing until the migrations grant it.
  * @param {Accounts} accounts
- * @param {boolean} manyDatabases whether the owner may make further databases named tarekeep_…
+ * @param {{ manyDatabases?: boolean, fromScratch?: boolean }} [how] manyDatabases: the owner may make further
+ *   databases named tarekeep_…; fromScratch: what a cut-off first start left in the database goes
  */
-export function accountsSql(accounts, manyDatabases) {
+export function accountsSql(accounts, { manyDatabases = false, fromScratch = false } = {}) {
   const owned = manyDatabases ? [`\`${databaseName}\``, `\`${databaseName}\\_%\``] : [`\`${databaseName}\``];
   return [
     `DELETE FROM mysql.global_priv WHERE User = '' OR (User = 'root' AND Host <> 'localhost')`,
     `FLUSH PRIVILEGES`,
     `ALTER USER root@localhost IDENTIFIED BY '${accounts.rootPassword}'`,
+    ...(fromScratch ? [`DROP DATABASE IF EXISTS \`${databaseName}\``] : []),
     `CREATE DATABASE IF NOT EXISTS \`${databaseName}\` CHARACTER SET utf8mb4`,
     ...account(ownerUser, accounts.ownerPassword),
     ...owned.map((name) => `GRANT ALL PRIVILEGES ON ${name}.* TO '${ownerUser}'@'%' WITH GRANT OPTION`),

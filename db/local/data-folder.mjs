@@ -8,7 +8,7 @@ const longestSocketPath = 100;
 
 /**
  * @typedef {{ root: string, data: string, temporary: string, socket: string, log: string, setup: string,
- *   record: string }} DataFolder
+ *   pid: string, record: string, unfilled: string }} DataFolder
  */
 
 /**
@@ -35,7 +35,9 @@ export function prepareDataFolder(wished, user, say) {
     socket: Buffer.byteLength(inside) <= longestSocketPath ? inside : `/tmp/tarekeep-${shortHash(root)}.sock`,
     log: join(root, 'mariadb.log'),
     setup: join(root, 'accounts.sql'),
+    pid: join(root, 'pid'),
     record: join(root, 'server.json'),
+    unfilled: join(root, 'unfilled'),
   };
 }
 

@@ -1,5 +1,5 @@
 import { spawn, spawnSync } from 'node:child_process';
-import { existsSync, readFileSync, renameSync, rmSync } from 'node:fs';
+import { existsSync, readFileSync, renameSync, rmSync, writeFileSync } from 'node:fs';
 import { setTimeout as sleep } from 'node:timers/promises';
 import { ownerUser } from './accounts.mjs';
 
@@ -10,7 +10,9 @@ import { ownerUser } from './accounts.mjs';
  */
 
 /**
- * Makes the empty data directory unless it is there. It gets its name when it is whole.
+ * Makes the empty data directory unless it is there. It gets its name when it is whole. The mark beside it
+ * says that the first tables and rows are still to come: MariaDB commits each CREATE TABLE on its own, so a
+ * first start that was cut off has to begin again.
  * @param {{ folder: DataFolder, user?: SystemUser, programs: Programs }} place
  */
 export function makeDataDirectory({ folder, user, programs }) {
@@ -32,6 +34,7 @@ export function makeDataDirectory({ folder, user, programs }) {
     const output = made.error?.message ?? `${made.stdout}${made.stderr}`;
     throw new Error(`MariaDB could not make its data directory:\n${lastLines(output)}`);
   }
+  writeFileSync(folder.unfilled, '');
   renameSync(unfinished, folder.data);
 }
 
@@ -87,7 +90,7 @@ function serverOptions(folder, { port, forTests }) {
     '--no-defaults',
     `--datadir=${folder.data}`,
     `--socket=${folder.socket}`,
-    `--pid-file=${folder.root}/pid`,
+    `--pid-file=${folder.pid}`,
     `--tmpdir=${folder.temporary}`,
     `--log-error=${folder.log}`,
     `--init-file=${folder.setup}`,

@@ -1,4 +1,4 @@
-import { chownSync, rmSync, writeFileSync } from 'node:fs';
+import { chownSync, existsSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { accountsSql, appUser, databaseName, localAccounts, newAccounts, ownerUser } from './accounts.mjs';
 import { prepareDataFolder } from './data-folder.mjs';
 import { freePort, isPortFree } from './free-port.mjs';
@@ -11,7 +11,8 @@ import { clearAbandonedTestFolders, makeTestFolder, removeTestFolder } from './t
 
 /**
  * @typedef {{ ownerUrl: string, appUrl: string, socket: string, host: string, port: number,
- *   accounts: import('./accounts.mjs').Accounts, isUp: () => boolean, stop: () => Promise<void> }} LocalDatabase
+ *   accounts: import('./accounts.mjs').Accounts, isUp: () => boolean, markFilled: () => void,
+ *   stop: () => Promise<void> }} LocalDatabase
  */
 
 /**
@@ -38,6 +39,7 @@ export async function startLocalDatabase({ folder: wished, forTests = false, say
     port: running.port,
     accounts,
     isUp: () => isRunningWith(running.pid, folder.data),
+    markFilled: () => rmSync(folder.unfilled, { force: true }),
     stop: forTests ? () => discard(running.pid, path) : () => stopIfHeld(folder),
   };
 }
@@ -54,11 +56,15 @@ export async function startLocalDatabase({ folder: wished, forTests = false, say
  */
 async function useRunning({ folder, accounts, programs }, say) {
   const record = readRecord(folder.record);
-  if (!record || !isRunningWith(record.pid, folder.data)) return undefined;
+  if (!record || !isRunningWith(record.pid, folder.data)) return endUnrecorded(folder);
   const { pid, port } = record;
   const isRunning = () => isRunningWith(pid, folder.data);
   const password = accounts.ownerPassword;
-  if (await waitForSignIn({ programs, port, password, milliseconds: 10_000, isRunning })) {
+  const isFilled = !existsSync(folder.unfilled);
+  if (!isFilled && isHeldByAnother(record)) {
+    throw new Error(`Another start (process ${record.holder}) is just filling this database; wait for it.`);
+  }
+  if (isFilled && (await waitForSignIn({ programs, port, password, milliseconds: 10_000, isRunning }))) {
     say('the database of an earlier start still runs and is used again');
     if (!isHeldByAnother(record)) writeRecord(folder.record, { pid, port, holder: process.pid });
     return { pid, port };
@@ -67,11 +73,23 @@ async function useRunning({ folder, accounts, programs }, say) {
   return undefined;
 }
 
+/**
+ * Ends a server whose start was cut off before it could be recorded.
+ * @param {import('./data-folder.mjs').DataFolder} folder
+ * @returns {Promise<undefined>}
+ */
+async function endUnrecorded(folder) {
+  if (!existsSync(folder.pid)) return;
+  const pid = Number(readFileSync(folder.pid, 'utf8').trim());
+  if (pid > 0 && isRunningWith(pid, folder.data)) await endProcess(pid, 60_000);
+}
+
 /** @param {Place} place */
 async function startAnew(place) {
   const { folder, accounts, user, programs, forTests } = place;
   makeDataDirectory(place);
-  writeFileSync(folder.setup, accountsSql(accounts, forTests), { mode: 0o600 });
+  const sql = accountsSql(accounts, { manyDatabases: forTests, fromScratch: existsSync(folder.unfilled) });
+  writeFileSync(folder.setup, sql, { mode: 0o600 });
   if (user) chownSync(folder.setup, user.uid, user.gid);
   const port = await portFor(folder);
   const pid = await launchMariadb({ ...place, port });

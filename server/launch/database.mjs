@@ -7,7 +7,7 @@ import { say, step } from './say.mjs';
 /**
  * The database named by DATABASE_URL, or else the project's own.
  * @param {string} root
- * @returns {Promise<{ ownerUrl: string, appUrl: string }>}
+ * @returns {Promise<{ ownerUrl: string, appUrl: string, markFilled?: () => void }>}
  */
 export async function provideDatabase(root) {
   const given = process.env.DATABASE_URL;

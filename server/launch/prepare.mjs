@@ -26,10 +26,11 @@ export async function prepare() {
   recordStart(startRecord, { launcher: process.pid, port });
   atEnd(() => forgetStart(startRecord));
   await step('Packages', (note) => installPackagesOfLock(root, note));
-  const { ownerUrl, appUrl } = await provideDatabase(root);
+  const { ownerUrl, appUrl, markFilled } = await provideDatabase(root);
   const env = serverEnvironment({ port, listen, appUrl });
   mkdirSync(env.FILES_DIR, { recursive: true, mode: 0o700 });
   await fillDatabase(root, { ...env, DATABASE_OWNER_URL: ownerUrl });
+  markFilled?.();
   return { port, reach, env };
 }
 

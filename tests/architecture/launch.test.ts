@@ -92,9 +92,10 @@ describe('the accounts of the local database', () => {
     expect(new Set(passwords).size).toBe(6);
   });
 
-  it('give the server’s user no right at all, and the owner those on this product’s databases alone', () => {
-    const grants = accountsSql(newAccounts(), true).match(/GRANT .*/g) ?? [];
+  it('give the server’s user no right at all, and the owner those on this product’s databases alone, and drop nothing', () => {
+    const grants = accountsSql(newAccounts(), { manyDatabases: true }).match(/GRANT .*/g) ?? [];
     expect(grants).toHaveLength(2);
+    expect(accountsSql(newAccounts())).not.toContain('DROP');
     for (const grant of grants) expect(grant).toMatch(/ON `tarekeep(\\_%)?`\.\* TO 'tarekeep_owner'/);
   });
 });

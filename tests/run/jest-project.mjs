@@ -28,7 +28,8 @@ export async function runProject(name, { env, options }) {
  * @param {number | null} code
  */
 function count(results, code) {
-  if (!existsSync(results)) return { passed: 0, failed: 1, remark: 'ended without results' };
+  if (!existsSync(results))
+    return { passed: 0, failed: 1, remark: 'no test ran, or it ended before its results' };
   const found = JSON.parse(readFileSync(results, 'utf8'));
   const passed = found.numPassedTests;
   const failed = found.numFailedTests + found.numRuntimeErrorTestSuites;
