@@ -10,7 +10,7 @@ import { settleNearCombined } from './reconciliation/near-combined';
 import { NearShipments } from './reconciliation/near-reference';
 import type { Reconciliation } from './reconciliation/output';
 import { readPapers } from './reconciliation/papers';
-import { hasNearReference, settleRests } from './reconciliation/rest-of-split';
+import { settleUnnamedRests } from './reconciliation/rest-of-split';
 import { OpenLoads } from './reconciliation/same-load';
 import { settlePlainClaims } from './reconciliation/same-reference';
 import { suggest } from './reconciliation/suggestions';
@@ -25,7 +25,10 @@ export type { Match, Reconciliation, RuleName, Suggestion } from './reconciliati
  */
 export function reconcile(raw: ReconciliationInput): Reconciliation {
   const input = readInput(raw);
-  const desk = new Desk(readPapers(input.shipments), readPapers(input.receipts), input.windowDays);
+  const desk = new Desk(readPapers(input.shipments), readPapers(input.receipts), {
+    asOf: dayNumber(input.asOf),
+    windowDays: input.windowDays,
+  });
   const candidates = settleByReference(desk);
   candidates.push(...settleByLoad(desk, candidates));
   return outcomeOf(desk, suggest(desk, candidates), {
@@ -41,7 +44,6 @@ function settleByReference(desk: Desk): Candidate[] {
   const doubts = settlePlainClaims(desk, claims);
   const near = new NearShipments(desk);
   settleNearCombined(desk, index, near);
-  settleRests(desk, hasNearReference);
   return [...torn.flatMap((one) => candidatesOf(desk, one)), ...settleMistyped(desk, doubts, near)];
 }
 
@@ -57,16 +59,17 @@ const candidatesOf = (desk: Desk, { receipt, between }: Torn): Candidate[] =>
 /** Receipts without a reference. What stronger rules left open stays a rival. */
 function settleByLoad(desk: Desk, stronger: readonly Candidate[]): Candidate[] {
   const loads = new OpenLoads(desk);
-  const found = desk
-    .openReceipts()
-    .filter(({ reference }) => !reference)
-    .flatMap(loads.candidates);
+  const unnamed = desk.openReceipts().filter(({ reference }) => !reference);
+  const found = unnamed.flatMap(loads.candidates);
   const wanted = new Set(found.map(({ receipt }) => receipt));
   settle(
     desk,
     [...stronger, ...found],
     ({ rule, likeness, usual }) => rule === 'same load' && likeness < 2 && usual,
   );
-  settleRests(desk, (_, receipt) => !receipt.reference && !wanted.has(receipt));
+  settleUnnamedRests(
+    desk,
+    unnamed.filter((receipt) => !wanted.has(receipt)),
+  );
   return found;
 }

@@ -48,9 +48,12 @@ export class ReferenceIndex {
 
   /** The shipments that a receipt names, exactly, when it names several. */
   findSeveral(receipt: Paper): Paper[] | null {
-    const parts = readSeveral(receipt.text ?? '').map((reference) => this.find(receipt, reference)[0]);
-    const found = parts.filter((shipment) => shipment !== undefined);
-    return found.length === parts.length && new Set(found).size > 1 ? inOrder(new Set(found)) : null;
+    for (const parts of readSeveral(receipt.text ?? '')) {
+      const found = new Set(parts.map((reference) => this.find(receipt, reference)[0]));
+      const shipments = [...found].filter((shipment) => shipment !== undefined);
+      if (shipments.length === found.size && found.size > 1) return inOrder(shipments);
+    }
+    return null;
   }
 }
 

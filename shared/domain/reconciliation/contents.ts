@@ -52,13 +52,16 @@ export function unitsApart(a: Contents, b: Contents): number {
   return sideBySide(a, b).reduce((sum, [, x, y]) => sum + Math.abs(x - y), 0);
 }
 
+/** A wrong type leaves contents like when another line agrees. */
 export function likenessOf(a: Contents, b: Contents): Likeness {
   if (a.signature === b.signature) return 0;
   const shared = 1 - LIKE;
   if (Math.abs(a.units - b.units) > shared * Math.max(a.units, b.units)) return 3;
-  const apart = unitsApart(a, b);
+  const rows = sideBySide(a, b);
+  const apart = rows.reduce((sum, [, x, y]) => sum + Math.abs(x - y), 0);
   const share = 1 - (2 * apart) / (a.units + b.units + apart);
-  return share >= A_FEW_APART ? 1 : share >= LIKE ? 2 : 3;
+  if (share >= LIKE) return share >= A_FEW_APART ? 1 : 2;
+  return rows.some(([, x, y]) => x === y) && oneTypeWrong(a, b) ? 2 : 3;
 }
 
 /** What of the declared was not counted, or null when more of some type was counted than declared. */
@@ -71,10 +74,11 @@ export function restOf(declared: Contents, counted: Contents): Contents | null {
   return fromUnits(rest);
 }
 
-/** The quantities agree line by line and only types differ: the mark of a type booked wrongly. */
-export function onlyTypesDiffer(a: Contents, b: Contents): boolean {
-  const quantities = ({ lines }: Contents) => lines.map(([, n]) => n).sort((x, y) => x - y);
-  return quantities(a).join() === quantities(b).join();
+/** All units of one type were booked under another, which may hold units of its own. */
+export function oneTypeWrong(declared: Contents, counted: Contents): boolean {
+  if (declared.units !== counted.units) return false;
+  const changed = sideBySide(declared, counted).filter(([, x, y]) => x !== y);
+  return changed.length === 2 && changed.some(([, x, y]) => x > 0 && y === 0);
 }
 
 export const differencesOf = (declared: Contents, counted: Contents): LineDifference[] =>

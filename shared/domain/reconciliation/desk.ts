@@ -19,8 +19,18 @@ export class Desk {
   constructor(
     readonly shipments: readonly Paper[],
     readonly receipts: readonly Paper[],
-    readonly windowDays: number,
+    private readonly terms: { asOf: number; windowDays: number },
   ) {}
+
+  get windowDays(): number {
+    return this.terms.windowDays;
+  }
+
+  /** By the lane's habit, or the window where there is none, it can still be on its way. */
+  mayStillCome({ lane, day }: Paper): boolean {
+    const days = this.terms.asOf - day;
+    return !(this.usual.isTooLong(lane, days) ?? days > this.windowDays);
+  }
 
   pair(pairing: Pairing): void {
     this.pairings.push(pairing);

@@ -1,9 +1,11 @@
 import { type Candidate, settle } from './contest';
 import type { Desk } from './desk';
+import { settleDoubts } from './doubts';
 import { NearShipments } from './near-reference';
 import { OtherSites } from './other-site';
 import type { Paper } from './papers';
-import { type Doubt, mayBeWrongType, settleDoubts } from './same-reference';
+import { settleMistypedRests } from './rest-of-split';
+import type { Doubt } from './same-reference';
 import { couldBeTwins } from './twins';
 
 /**
@@ -11,32 +13,38 @@ import { couldBeTwins } from './twins';
  * candidates that stay open, the strongest rule first.
  */
 export function settleMistyped(desk: Desk, doubts: readonly Doubt[], near: NearShipments): Candidate[] {
-  const inDoubt = settleDoubts(desk, doubts, near.candidates);
-  const undecided = new Set(
-    inDoubt.filter((c) => c.likeness < 3 || mayBeWrongType(c)).map(({ receipt }) => receipt),
-  );
   const elsewhere = new OtherSites(desk);
-  const { first, again } = firstEntries(desk.openReceipts());
-  const found = first.flatMap((receipt) => [...elsewhere.candidates(receipt), ...near.candidates(receipt)]);
+  const alternatives = (receipt: Paper) => [...elsewhere.candidates(receipt), ...near.candidates(receipt)];
+  const inDoubt = settleDoubts(desk, doubts, alternatives);
+  const undecided = new Set(inDoubt.filter((c) => c.likeness < 3).map(({ receipt }) => receipt));
+  settleMistypedRests(desk);
+  const { first, again } = firstEntries(desk.openReceipts(), undecided);
+  const found = first.flatMap(alternatives);
   const settled = settle(
     desk,
     [...inDoubt, ...found],
-    ({ receipt, rule }) => rule !== 'same reference' && !undecided.has(receipt),
+    (candidate) => mayMatch(candidate) && !undecided.has(candidate.receipt),
   );
   for (const { receipt } of settled) for (const twin of again.get(receipt) ?? []) desk.double(twin, receipt);
   const open = doubts.filter(({ claim }) =>
     [...claim.shipments, ...claim.receipts].every((p) => desk.isOpen(p)),
   );
-  const stillInDoubt = settleDoubts(desk, open, near.candidates);
+  const stillInDoubt = settleDoubts(desk, open, alternatives);
   return [...stillInDoubt, ...found];
 }
 
+const mayMatch = ({ rule, likeness }: Candidate): boolean =>
+  rule === 'other site' ? likeness === 0 : rule === 'near reference' && likeness < 3;
+
 /** Of receipts with one reference, lane and contents, a day apart at most, only the first seeks a shipment. */
-function firstEntries(receipts: Paper[]): { first: Paper[]; again: Map<Paper, Paper[]> } {
+function firstEntries(
+  receipts: Paper[],
+  undecided: Set<Paper>,
+): { first: Paper[]; again: Map<Paper, Paper[]> } {
   const seen = new Map<string, Paper[]>();
   const again = new Map<Paper, Paper[]>();
   const first = receipts.filter((receipt) => {
-    if (!receipt.reference) return false;
+    if (!receipt.reference || undecided.has(receipt)) return undecided.has(receipt);
     const key = JSON.stringify([receipt.lane, receipt.reference.core, receipt.contents.signature]);
     const earlier = (seen.get(key) ?? []).find((one) => couldBeTwins(one, receipt));
     if (earlier) again.set(earlier, [...(again.get(earlier) ?? []), receipt]);

@@ -3,7 +3,7 @@ import { likenessOf, sumOf } from './contents';
 import type { Desk } from './desk';
 import type { NearShipments } from './near-reference';
 import { inOrder, type Paper } from './papers';
-import { readSeveral } from './references';
+import { readSeveral, type Reference } from './references';
 
 // Two parts with that many readings each are beyond telling.
 const MOST_READINGS = 50;
@@ -14,7 +14,7 @@ const MOST_READINGS = 50;
  */
 export function settleNearCombined(desk: Desk, index: ReferenceIndex, near: NearShipments): void {
   for (const receipt of desk.openReceipts()) {
-    const readings = readingsOf(desk, receipt, (reference) => {
+    const readings = readingsOf(receipt, (reference) => {
       const exact = index.find(receipt, reference).filter((shipment) => desk.isOpen(shipment));
       return exact.length > 0 ? exact : near.around(receipt, reference);
     });
@@ -26,16 +26,15 @@ export function settleNearCombined(desk: Desk, index: ReferenceIndex, near: Near
   }
 }
 
-function readingsOf(
-  desk: Desk,
-  receipt: Paper,
-  find: (reference: NonNullable<Paper['reference']>) => Paper[],
-): Paper[][] {
-  const parts = readSeveral(receipt.text ?? '');
-  if (parts.length < 2) return [];
+type Find = (reference: Reference) => Paper[];
+
+const readingsOf = (receipt: Paper, find: Find): Paper[][] =>
+  readSeveral(receipt.text ?? '').flatMap((parts) => combine(parts.map(find)));
+
+/** One shipment for each part, in every way, none twice. */
+function combine(parts: Paper[][]): Paper[][] {
   let readings: Paper[][] = [[]];
-  for (const part of parts) {
-    const found = find(part);
+  for (const found of parts) {
     readings = readings.flatMap((reading) =>
       found.filter((shipment) => !reading.includes(shipment)).map((shipment) => [...reading, shipment]),
     );

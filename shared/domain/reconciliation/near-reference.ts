@@ -1,5 +1,5 @@
 import type { Candidate } from './contest';
-import { likenessOf } from './contents';
+import { likenessOf, oneTypeWrong } from './contents';
 import type { Desk } from './desk';
 import { inWindow, type Paper } from './papers';
 import { isNear, NearIndex } from './near-references';
@@ -37,6 +37,6 @@ export class NearShipments {
         likeness: likenessOf(shipment.contents, receipt.contents),
         usual: this.desk.usual.isUsual(shipment.lane, receipt.day - shipment.day),
       }))
-      .filter(({ likeness }) => likeness < 3);
+      .filter(({ shipment, likeness }) => likeness < 3 || oneTypeWrong(shipment.contents, receipt.contents));
   };
 }

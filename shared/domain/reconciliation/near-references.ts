@@ -1,7 +1,7 @@
 import { type Reference, withoutLookAlikes } from './references';
 
-// With fewer characters every reference is near every other.
-const SHORTEST = 4;
+// A single character is near to every other.
+const SHORTEST = 2;
 
 const formsOf = (reference: Reference): string[] =>
   [...new Set([reference.compact, reference.padded, reference.core])].filter((f) => f.length >= SHORTEST);
@@ -10,11 +10,15 @@ const withoutOne = (text: string): string[] => [
   ...new Set(Array.from(text, (_, at) => text.slice(0, at) + text.slice(at + 1))),
 ];
 
-/** One character of `right` dropped, changed, or two neighbours swapped gives `written`. */
+/**
+ * One character of `right` dropped, changed, or two neighbours swapped gives `written`. One character more
+ * is a hyphen or blank that was changed, for these are set aside before.
+ */
 function oneSlip(written: string, right: string): boolean {
   let at = 0;
   while (at < written.length && written[at] === right[at]) at += 1;
   if (written.length === right.length - 1) return written.slice(at) === right.slice(at + 1);
+  if (written.length === right.length + 1) return written.slice(at + 1) === right.slice(at);
   if (written.length !== right.length || at === written.length) return false;
   if (written.slice(at + 1) === right.slice(at + 1)) return true;
   const swapped = written[at] === right[at + 1] && written[at + 1] === right[at];
@@ -37,7 +41,11 @@ export class NearIndex<T> {
   private readonly entries = new Map<string, T[]>();
 
   add(lane: string, reference: Reference, entry: T): void {
-    const keys = formsOf(reference).flatMap((form) => [...withoutOne(form), `=${withoutLookAlikes(form)}`]);
+    const keys = formsOf(reference).flatMap((form) => [
+      form,
+      ...withoutOne(form),
+      `=${withoutLookAlikes(form)}`,
+    ]);
     for (const key of new Set(keys)) {
       const place = `${lane}\u0000${key}`;
       const there = this.entries.get(place);

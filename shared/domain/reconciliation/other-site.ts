@@ -1,9 +1,10 @@
 import type { Candidate } from './contest';
+import { likenessOf } from './contents';
 import type { Desk } from './desk';
 import { inWindow, type Paper } from './papers';
 import { prefixesAgree } from './references';
 
-/** Open shipments with the receipt's reference and contents that were sent from, or to, another site. */
+/** Open shipments with the receipt's reference and like contents that were sent from, or to, another site. */
 export class OtherSites {
   private readonly byCore = new Map<string, Paper[]>();
 
@@ -22,8 +23,14 @@ export class OtherSites {
     return (this.byCore.get(reference.core) ?? [])
       .filter((shipment) => shipment.reference && prefixesAgree(shipment.reference, reference))
       .filter((shipment) => (shipment.from === receipt.from) !== (shipment.to === receipt.to))
-      .filter((shipment) => inWindow(this.desk.windowDays, shipment, receipt))
-      .filter((shipment) => shipment.contents.signature === receipt.contents.signature)
-      .map((shipment) => ({ shipment, receipt, rule: 'other site', likeness: 0, usual: true }));
+      .filter((shipment) => this.desk.isOpen(shipment) && inWindow(this.desk.windowDays, shipment, receipt))
+      .map((shipment) => ({
+        shipment,
+        receipt,
+        rule: 'other site' as const,
+        likeness: likenessOf(shipment.contents, receipt.contents),
+        usual: this.desk.usual.isUsual(shipment.lane, receipt.day - shipment.day),
+      }))
+      .filter(({ likeness }) => likeness < 3);
   };
 }

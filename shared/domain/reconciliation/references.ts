@@ -13,6 +13,7 @@ export interface Reference {
 const NOISE = /[^\p{L}\p{N}]+/gu;
 const LEADING_LETTERS = /^\p{L}+/u;
 const SEPARATORS = /[+,;&|\n]|\band\b/iu;
+const FIRM_SEPARATORS = /[/+,;&|\n]|\band\b/iu;
 const LOOSE_SEPARATORS = /[/\s]+|[+,;&|]|\band\b/iu;
 
 const LOOK_ALIKE: Record<string, string> = { O: '0', I: '1', S: '5', B: '8' };
@@ -30,17 +31,28 @@ export function readReference(text: string | null): Reference | null {
 /** Whether the signs between the parts say that several references are meant. */
 export const namesSeveral = (text: string): boolean => SEPARATORS.test(text);
 
-/** The references that a text may name when it names several; fewer than two mean that it names one. */
-export function readSeveral(text: string): Reference[] {
-  const words = text.split(LOOSE_SEPARATORS).filter((word) => word.replace(NOISE, '') !== '');
+/**
+ * The references that a text may name when it names several, in each way to read it: blanks part them, or
+ * stand inside them. Fewer than two mean that it names one.
+ */
+export function readSeveral(text: string): Reference[][] {
+  const readings = [FIRM_SEPARATORS, LOOSE_SEPARATORS].map((by) =>
+    withPrefixes(text.split(by).filter((word) => word.replace(NOISE, '') !== ''))
+      .map(readReference)
+      .filter((reference) => reference !== null),
+  );
+  return readings.filter((parts, at) => parts.length > 1 && parts.length !== readings[at - 1]?.length);
+}
+
+/** A word of letters alone is the prefix of the next. */
+function withPrefixes(words: string[]): string[] {
   const joined: string[] = [];
   for (const word of words) {
     const before = joined.at(-1);
-    const letters = before !== undefined && /^[^\p{N}]+$/u.test(before);
-    if (letters) joined[joined.length - 1] = before + word;
+    if (before !== undefined && /^[^\p{N}]+$/u.test(before)) joined[joined.length - 1] = before + word;
     else joined.push(word);
   }
-  return joined.map(readReference).filter((reference) => reference !== null);
+  return joined;
 }
 
 /** Two prefixes can belong to one pad when they are the same or one was left out. */

@@ -1,6 +1,6 @@
 import { type Contents, likenessOf, restOf, sumOf } from './contents';
 import type { Desk, Pairing } from './desk';
-import { isNear } from './near-references';
+import { isNear, NearIndex } from './near-references';
 import { inWindow, type Paper } from './papers';
 
 interface Short {
@@ -12,39 +12,54 @@ interface Short {
 // A part that is still to come is more than a miscount by a few.
 const PART = 0.1;
 
-/**
- * Further parts of deliveries that came short, whose own reference is mistyped or missing: the receipt
- * holds what is missing, to the unit, and nothing else could be meant on either side.
- */
-export function settleRests(desk: Desk, fits: (shipment: Paper, receipt: Paper) => boolean): void {
-  const shorts = gather(shortDeliveries(desk), ({ shipment, rest }) => placeOf(shipment.lane, rest));
-  const receipts = gather(desk.openReceipts(), ({ lane, contents }) => placeOf(lane, contents));
-  for (const [place, here] of shorts) {
-    const pairs = here.flatMap((short) =>
-      (receipts.get(place) ?? [])
-        .filter(
-          (receipt) => inWindow(desk.windowDays, short.shipment, receipt) && fits(short.shipment, receipt),
-        )
-        .map((receipt) => ({ short, receipt })),
-    );
-    for (const { short, receipt } of pairs) {
-      const rivals = pairs.filter((pair) => pair.short === short || pair.receipt === receipt);
-      if (rivals.length === 1) desk.extend(short.pairing, receipt);
-    }
+/** What is left of a short delivery and a receipt that may be it. */
+interface Completion {
+  short: Short;
+  receipt: Paper;
+}
+
+/** Further parts whose reference is mistyped: on the same lane, like what is missing, and with no rival. */
+export function settleMistypedRests(desk: Desk): void {
+  const index = new NearIndex<Short>();
+  for (const short of shortDeliveries(desk))
+    if (short.shipment.reference) index.add(short.shipment.lane, short.shipment.reference, short);
+  const completions = desk.openReceipts().flatMap((receipt) => {
+    const written = receipt.reference;
+    if (!written) return [];
+    return index
+      .around(receipt.lane, written)
+      .filter(({ shipment }) => shipment.reference && isNear(written, shipment.reference))
+      .filter(({ rest }) => likenessOf(rest, receipt.contents) < 2)
+      .map((short) => ({ short, receipt }));
+  });
+  complete(desk, completions);
+}
+
+/** Further parts without a reference: exactly what is missing, and nothing else that could be meant. */
+export function settleUnnamedRests(desk: Desk, receipts: readonly Paper[]): void {
+  const byRest = new Map<string, Short[]>();
+  for (const short of shortDeliveries(desk)) {
+    const place = placeOf(short.shipment.lane, short.rest);
+    byRest.set(place, [...(byRest.get(place) ?? []), short]);
   }
+  const completions = receipts.flatMap((receipt) =>
+    (byRest.get(placeOf(receipt.lane, receipt.contents)) ?? []).map((short) => ({ short, receipt })),
+  );
+  complete(desk, completions);
+}
+
+function complete(desk: Desk, completions: Completion[]): void {
+  const possible = completions.filter(({ short, receipt }) =>
+    inWindow(desk.windowDays, short.shipment, receipt),
+  );
+  const byPaper = new Map<Paper, number>();
+  for (const { short, receipt } of possible)
+    for (const paper of [short.shipment, receipt]) byPaper.set(paper, (byPaper.get(paper) ?? 0) + 1);
+  for (const { short, receipt } of possible)
+    if (byPaper.get(short.shipment) === 1 && byPaper.get(receipt) === 1) desk.extend(short.pairing, receipt);
 }
 
 const placeOf = (lane: string, { signature }: Contents) => `${lane}\u0000${signature}`;
-
-function gather<T>(all: T[], key: (one: T) => string): Map<string, T[]> {
-  const gathered = new Map<string, T[]>();
-  for (const one of all) {
-    const there = gathered.get(key(one));
-    if (there) there.push(one);
-    else gathered.set(key(one), [one]);
-  }
-  return gathered;
-}
 
 function shortDeliveries(desk: Desk): Short[] {
   return desk.pairings.flatMap((pairing) => {
@@ -56,7 +71,3 @@ function shortDeliveries(desk: Desk): Short[] {
     return rest && rest.units > PART * shipment.contents.units ? [{ pairing, shipment, rest }] : [];
   });
 }
-
-/** One part's reference is mistyped. */
-export const hasNearReference = (shipment: Paper, receipt: Paper): boolean =>
-  shipment.reference !== null && receipt.reference !== null && isNear(receipt.reference, shipment.reference);

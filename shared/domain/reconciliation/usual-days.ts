@@ -27,6 +27,13 @@ export class UsualDays {
     return upTo > RARE * total && from > RARE * total;
   }
 
+  /** Longer than all but the rarest deliveries of the lane took; null where no habit is known. */
+  isTooLong(lane: string, days: number): boolean | null {
+    const counts = this.countsOf(lane);
+    if (!counts) return null;
+    return [...counts].reduce((sum, [d, n]) => sum + (d >= days ? n : 0), 0) <= RARE * totalOf(counts);
+  }
+
   /** Share of the lane's deliveries that took this many days, never quite 0. */
   share(lane: string, days: number): number {
     const counts = this.countsOf(lane);
