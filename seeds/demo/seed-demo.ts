@@ -1,0 +1,62 @@
+import type { Database } from '@/db/client';
+import { outsideAccount, siteAccount } from '@/server/modules/ledger/accounts';
+import { postEntry } from '@/server/modules/ledger/post-entry';
+import { addDays, firstDayOfMonth, lastDayOfMonth, monthOf, previousMonth } from '@/shared/domain/calendar';
+import { bookOf } from './book';
+import { drawsFrom } from './random';
+import { companies, openingStock } from './scenario';
+import { changeStock, liveDay, type World } from './simulate';
+import { writeScenario } from './write-scenario';
+
+export type Demo = { today: string; say: (line: string) => void };
+
+/**
+ * Six months of the scenario up to today, the same at every run of the same day: four closed months with statements,
+ * one to be closed, and the days since. The last week keeps its differences open.
+ */
+export async function seedDemo(db: Database, { today, say }: Demo): Promise<void> {
+  const openMonth = monthOf(addDays(today, -15));
+  const firstMonth = backBy(openMonth, 4);
+  const opened = firstDayOfMonth(firstMonth);
+  const cast = await db.transaction((tx) =>
+    writeScenario(tx, { on: opened, rateChangeOn: `${backBy(openMonth, 1)}-15` }),
+  );
+  const world: World = {
+    book: bookOf(db, cast),
+    draws: drawsFrom(20_261_201),
+    stock: new Map(),
+    underway: [],
+  };
+  await openTheBook(world, opened);
+  for (let day = opened; day <= today; day = addDays(day, 1)) {
+    await liveDay(world, day, { settle: day <= addDays(today, -8) });
+    if (day === lastDayOfMonth(day.slice(0, 7))) say(`moved through ${monthOf(day)}`);
+  }
+}
+
+function backBy(month: string, months: number): string {
+  return months === 0 ? month : backBy(previousMonth(month), months - 1);
+}
+
+/** The plants' stock on the first day, from the opening account. */
+async function openTheBook(world: World, on: string): Promise<void> {
+  const { book } = world;
+  const operator = companies.find((company) => company.kind === 'operator');
+  await book.onDay(async (tx) => {
+    const opening = await outsideAccount(tx, 'opening');
+    for (const { site, typeCode, units } of openingStock) {
+      const to = await siteAccount(tx, {
+        id: book.siteId(site),
+        companyId: book.cast.companyIds.get(operator?.code ?? '') ?? '',
+      });
+      await postEntry(tx, {
+        kind: 'opening',
+        valueDate: on,
+        moves: [{ typeCode, from: opening, to, units }],
+        reason: 'Counted when the book was opened',
+        personId: book.handOf(site),
+      });
+      changeStock(world, { site, typeCode }, units);
+    }
+  });
+}
