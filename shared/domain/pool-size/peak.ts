@@ -30,14 +30,15 @@ export function dispatchPerDay(flows: PoolInput['flows']): Dispatch {
 
 /**
  * RULES 7, Peak. Of each day's dispatch a share p_k is still out k days later. Independent: each container
- * decides for itself, so the day's number is thinned binomially. Together: all of it is out, or none.
+ * decides for itself, so the day's number is thinned binomially. Together: all of it is out, or none; the
+ * rules' (v + m²) p − m² p² is written as v p + m² p (1 − p), which loses nothing to cancelling.
  */
 export function peakInLoop(dispatch: Dispatch, stillOut: readonly number[], travel: TravelMode): Peak {
   const { mean: m, variance: v } = dispatch;
   const varianceOfDay =
     travel === 'independent'
       ? (p: number) => v * p * p + m * p * (1 - p)
-      : (p: number) => (v + m * m) * p - m * m * p * p;
+      : (p: number) => v * p + m * m * p * (1 - p);
   return stillOut.reduce(
     (peak, p) => ({ mean: peak.mean + m * p, variance: peak.variance + varianceOfDay(p) }),
     { mean: 0, variance: 0 },
