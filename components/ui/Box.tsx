@@ -40,4 +40,7 @@ export function Box({ children, gap = 'm', row, wrap, align, spread, grow, pad, 
   return <View style={[styles.box, style]}>{children}</View>;
 }
 
-const styles = StyleSheet.create({ box: { minWidth: 0 } });
+const styles = StyleSheet.create({
+  // Static, so that a link that stretches over its card is not held in by what stands around it.
+  box: { minWidth: 0, position: 'static' },
+});

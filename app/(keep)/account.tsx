@@ -1,0 +1,3 @@
+import { AccountScreen } from '@/components/session/AccountScreen';
+
+export default AccountScreen;

@@ -1,0 +1,3 @@
+import { MoreScreen } from '@/components/shell/MoreScreen';
+
+export default MoreScreen;

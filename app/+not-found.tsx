@@ -1,0 +1,3 @@
+import { NotFoundScreen } from '@/components/shell/NotFoundScreen';
+
+export default NotFoundScreen;

@@ -1,0 +1,3 @@
+import { ForgottenPasswordScreen } from '@/components/session/ForgottenPasswordScreen';
+
+export default ForgottenPasswordScreen;
