@@ -25,7 +25,13 @@ export async function buildClient(root, note) {
   const unfinished = join(root, '.local/client-build');
   rmSync(unfinished, { recursive: true, force: true });
   const args = ['export', '--platform', 'web', '--output-dir', '.local/client-build'];
-  const env = { CI: '1', EXPO_NO_TELEMETRY: '1', EXPO_OFFLINE: '1', NODE_ENV: 'production' };
+  const env = {
+    CI: '1',
+    EXPO_NO_TELEMETRY: '1',
+    EXPO_OFFLINE: '1',
+    EXPO_NO_TYPESCRIPT_SETUP: '1',
+    NODE_ENV: 'production',
+  };
   await runProgram(join(root, 'node_modules/.bin/expo'), args, { env });
   writeFileSync(join(unfinished, stamp), hash);
   rmSync(target, { recursive: true, force: true });

@@ -19,7 +19,13 @@ runUntilEnded(async () => {
     return waitForHealth({ port, reach, milliseconds: 60_000 });
   });
   const clientPort = (await isPortFree(8081)) ? 8081 : await freePort();
-  const client = { API_PORT: String(port), BROWSER: 'none', EXPO_NO_TELEMETRY: '1', EXPO_OFFLINE: '1' };
+  const client = {
+    API_PORT: String(port),
+    BROWSER: 'none',
+    EXPO_NO_TELEMETRY: '1',
+    EXPO_OFFLINE: '1',
+    EXPO_NO_TYPESCRIPT_SETUP: '1',
+  };
   run('expo', ['start', '--web', '--port', String(clientPort)], client);
   console.log(`\n  Client with fast refresh: http://localhost:${clientPort}`);
   console.log(`  API:                      http://${reach}:${port}\n`);
