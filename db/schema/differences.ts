@@ -1,4 +1,4 @@
-import { bigint, check, index, mysqlTable, varchar } from 'drizzle-orm/mysql-core';
+import { bigint, check, index, mysqlTable, uniqueIndex, varchar } from 'drizzle-orm/mysql-core';
 import { sql } from 'drizzle-orm';
 import { amount, code, day, id, instant, units } from '../columns';
 import { companies, people } from './companies';
@@ -107,9 +107,17 @@ export const disputes = mysqlTable(
     claimed: units('claimed').notNull(),
     reason: varchar('reason', { length: 20 }).$type<(typeof disputeReasons)[number]>().notNull(),
     state: varchar('state', { length: 20 }).$type<DisputeState>().notNull(),
-    /** Held out of "due now" while it is not decided; 0 for a count. */
+    /** For a line that is not reckoned by units: the money claimed to be too much; else 0. */
+    amountClaimed: amount('amount_claimed').notNull().default('0.0000'),
+    /** Held out of "due now" while it is not decided; 0 for a count and once decided. */
     amountHeld: amount('amount_held').notNull(),
     acceptedUnits: units('accepted_units'),
+    acceptedAmount: amount('accepted_amount'),
+    /** What is disputed, while it is not decided: one open dispute for each line, or count and type. */
+    openKey: code('open_key', { length: 90 }),
+    /** The latest letter about it to each side, sent or put off: at most one an hour. */
+    partnerMailAt: instant('partner_mail_at'),
+    operatorMailAt: instant('operator_mail_at'),
     openedBy: id('opened_by').references(() => people.id),
     openedAt: instant('opened_at').notNull(),
     lastWordAt: instant('last_word_at').notNull(),
@@ -121,7 +129,8 @@ export const disputes = mysqlTable(
     index('disputes_state').on(table.state, table.lastWordAt, table.id),
     index('disputes_statement').on(table.statementId),
     index('disputes_shipment').on(table.shipmentId),
-    check('disputes_claim_differs', sql`stated <> claimed`),
+    uniqueIndex('disputes_open_key').on(table.openKey),
+    check('disputes_claim_differs', sql`stated <> claimed or amount_claimed > 0`),
   ],
 );
 
