@@ -23,15 +23,13 @@ async function run(): Promise<void> {
       return console.log('the book has entries already: nothing to seed');
     if (has(begun)) await emptyDatabase(process.env.DATABASE_OWNER_URL ?? url, url);
     const mark = (action: string) =>
-      db
-        .insert(log)
-        .values({
-          at: new Date().toISOString(),
-          action,
-          outcome: 'done',
-          subjectKind: 'demo',
-          requestId: 'seed',
-        });
+      db.insert(log).values({
+        at: new Date().toISOString(),
+        action,
+        outcome: 'done',
+        subjectKind: 'demo',
+        requestId: 'seed',
+      });
     await mark(begun);
     await seedDemo(db, {
       today: dayInZone(new Date(), 'Europe/Copenhagen'),

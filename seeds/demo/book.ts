@@ -2,7 +2,7 @@ import type { Database, Transaction } from '@/db/client';
 import { inTransaction } from '@/db/transaction';
 import { countShipment, type CountedLine } from '@/server/modules/shipments/count-shipment';
 import { sendShipment } from '@/server/modules/shipments/send-shipment';
-import { companies } from './scenario';
+import { companies } from './scenario-companies';
 import type { Cast } from './write-scenario';
 
 export type Underway = {

@@ -4,7 +4,8 @@ import { postEntry } from '@/server/modules/ledger/post-entry';
 import { addDays, firstDayOfMonth, lastDayOfMonth, monthOf, previousMonth } from '@/shared/domain/calendar';
 import { bookOf } from './book';
 import { drawsFrom } from './random';
-import { companies, openingStock } from './scenario';
+import { companies } from './scenario-companies';
+import { openingStock } from './scenario-lanes';
 import { changeStock, liveDay, type World } from './simulate';
 import { writeScenario } from './write-scenario';
 

@@ -2,7 +2,7 @@ import { addDays, dayNumber } from '@/shared/domain/calendar';
 import type { CountedLine } from '@/server/modules/shipments/count-shipment';
 import type { Book, Underway } from './book';
 import type { Draws } from './random';
-import { type Lane, lanes } from './scenario';
+import { type Lane, lanes } from './scenario-lanes';
 import { settleOld } from './settle-old';
 
 /** Monday is 1. Day 0 of the day numbers, 1 January 1970, was a Thursday. */

@@ -4,7 +4,9 @@ import { companies as companyRows, people, personRoles, sites, terms } from '@/d
 import { containerTypes as typeRows, packedWith, parts as partRows, poolPlans } from '@/db/schema/containers';
 import { addDays } from '@/shared/domain/calendar';
 import { hashPassword } from '@/server/modules/session/password';
-import { companies, containerTypes, loops, parts } from './scenario';
+import { companies } from './scenario-companies';
+import { loops, parts } from './scenario-pool';
+import { containerTypes } from './scenario-types';
 import signIns from './sign-ins.json';
 
 const zone = 'Europe/Copenhagen';

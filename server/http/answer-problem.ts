@@ -7,6 +7,8 @@ import { writeLog } from '../modules/log/write-log';
 
 /** Every failure leaves as one shape. What we did not foresee is logged whole and answered without detail. */
 export function answerProblem(deps: Deps): ErrorRequestHandler {
+  // Express tells an error handler by its four parameters.
+  // eslint-disable-next-line max-params
   return async (error: unknown, request, response, _next) => {
     const problem = problemOf(error);
     if (problem.code === 'failed here') request.log.error({ err: error }, 'failed');

@@ -1,0 +1,124 @@
+/** Packing specifications for the pool's demand. */
+export const parts = [
+  {
+    number: 'HX-2210',
+    name: 'heat exchanger coil',
+    typeCode: 'TOTE-64',
+    supplier: 'KESTREL',
+    plant: 'TARNBY',
+    unitsPerContainer: 12,
+    mean: '1760',
+    sd: '240',
+  },
+  {
+    number: 'HS-0417',
+    name: 'housing shell',
+    typeCode: 'BOX-1210',
+    supplier: 'BRAMBLE',
+    plant: 'TARNBY',
+    unitsPerContainer: 16,
+    mean: '150',
+    sd: '30',
+  },
+  {
+    number: 'CP-0820',
+    name: 'scroll compressor',
+    typeCode: 'RACK-CP',
+    supplier: 'SUNDHOLM',
+    plant: 'OSTREL',
+    unitsPerContainer: 8,
+    mean: '72',
+    sd: '11',
+  },
+  {
+    number: 'FA-1100',
+    name: 'fastener kit',
+    typeCode: 'TOTE-43',
+    supplier: 'PALLWICK',
+    plant: 'TARNBY',
+    unitsPerContainer: 200,
+    mean: '24800',
+    sd: '4100',
+  },
+  {
+    number: 'PN-3306',
+    name: 'side panel',
+    typeCode: 'BOX-1210',
+    supplier: 'ORRIN',
+    plant: 'TARNBY',
+    unitsPerContainer: 24,
+    mean: '260',
+    sd: '45',
+  },
+  {
+    number: 'EC-5012',
+    name: 'controller board',
+    typeCode: 'TOTE-43',
+    supplier: 'MAREN',
+    plant: 'OSTREL',
+    unitsPerContainer: 30,
+    mean: '930',
+    sd: '140',
+  },
+] as const;
+
+/** The loop of each type with demand; days from the coordinator's own notes, invented. */
+export const loops: Readonly<
+  Record<
+    string,
+    {
+      travel: 'independent' | 'together';
+      bufferDays: string;
+      legs: readonly (readonly [string, number, number])[];
+    }
+  >
+> = {
+  'TOTE-64': {
+    travel: 'together',
+    bufferDays: '2',
+    legs: [
+      ['filled at the supplier', 1.5, 0.5],
+      ['on the way to the plant', 1, 0.3],
+      ['full stock at the plant', 2, 1],
+      ['at the line', 0.5, 0.1],
+      ['empties at the plant', 2.5, 1.2],
+      ['on the way back', 1, 0.3],
+    ],
+  },
+  'TOTE-43': {
+    travel: 'together',
+    bufferDays: '2',
+    legs: [
+      ['filled at the supplier', 2, 0.7],
+      ['on the way to the plant', 1, 0.3],
+      ['full stock at the plant', 3, 1.2],
+      ['at the line', 0.5, 0.2],
+      ['empties at the plant', 2, 1],
+      ['on the way back', 1, 0.3],
+    ],
+  },
+  'BOX-1210': {
+    travel: 'independent',
+    bufferDays: '3',
+    legs: [
+      ['filled at the supplier', 2, 0.8],
+      ['on the way to the plant', 1, 0.4],
+      ['full stock at the plant', 2.5, 1],
+      ['at the line', 1, 0.3],
+      ['empties at the plant', 3, 1.5],
+      ['on the way back', 1.5, 0.5],
+    ],
+  },
+  'RACK-CP': {
+    travel: 'together',
+    bufferDays: '1',
+    legs: [
+      ['filled at the supplier', 1, 0.3],
+      ['on the way to the plant', 0.5, 0.2],
+      ['full stock at the plant', 1.5, 0.5],
+      ['at the line', 0.5, 0.1],
+      ['empties at the plant', 1.5, 0.8],
+      ['on the way back', 0.5, 0.2],
+    ],
+  },
+};
