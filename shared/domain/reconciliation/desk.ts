@@ -26,7 +26,7 @@ export class Desk {
     return this.terms.windowDays;
   }
 
-  /** By the lane's habit, or the window where there is none, it can still be on its way. */
+  /** Left so lately that it can still be on its way: by the lane's habit, or the window where there is none. */
   mayStillCome({ lane, day }: Paper): boolean {
     const days = this.terms.asOf - day;
     return !(this.usual.isTooLong(lane, days) ?? days > this.windowDays);

@@ -3,7 +3,7 @@ import type { Candidate } from './contest';
 import { likenessOf, unitsApart } from './contents';
 import type { Delivery } from './deliveries';
 import type { Desk } from './desk';
-import { inWindow, type Paper } from './papers';
+import type { Paper } from './papers';
 import { accept, declaredOf, type Doubt } from './same-reference';
 
 /** The open shipments that a receipt could mean otherwise: a mistyped reference, another site. */
@@ -14,18 +14,15 @@ type Elsewhere = (receipt: Paper) => Candidate[];
  * receipts than it can use, the open shipments with a near reference are looked at before it is settled.
  * Returns what remains in doubt, as candidates.
  */
-export function settleDoubts(desk: Desk, doubts: readonly Doubt[], near: Elsewhere): Candidate[] {
-  const isMissing = missingShipments(desk, doubts);
+export function settleDoubts(desk: Desk, doubts: readonly Doubt[], alternatives: Elsewhere): Candidate[] {
   const left: Candidate[] = [];
   for (const { claim, delivery } of doubts) {
     const best = clearBest(rank(desk, claim, delivery.parts));
-    const choice = best && { claim, best, delivery };
-    const others = (receipt: Paper) =>
-      near(receipt).filter(({ shipment }) => !claim.shipments.includes(shipment));
-    const repeated = choice && doublesAreSound(choice, others, isMissing);
-    if (choice && repeated && isSound(choice, others))
-      accept(desk, claim, { ...delivery, parts: [choice.best.receipt] });
-    else left.push(...leaveOpen(desk, { claim, delivery }, repeated !== false));
+    const elsewhere = (receipt: Paper) =>
+      alternatives(receipt).filter(({ shipment }) => !claim.shipments.includes(shipment));
+    if (best && isSound(desk, { claim, best, delivery }, elsewhere))
+      accept(desk, claim, { ...delivery, parts: [best.receipt] });
+    else left.push(...leaveOpen(desk, { claim, delivery }));
   }
   return left;
 }
@@ -55,14 +52,19 @@ function clearBest(ranked: Candidate[]): Candidate | null {
   return asGood || second.usual > first.usual ? null : first;
 }
 
-/** No other receipt of the claim would serve it as well, while the best one serves a near shipment. */
-function isSound({ claim, best, delivery }: Choice, near: Elsewhere): boolean {
-  const elsewhere = near(best.receipt);
-  if (best.likeness === 3) return elsewhere.every(({ likeness }) => likeness > 1);
+function isSound(desk: Desk, choice: Choice, elsewhere: Elsewhere): boolean {
+  if (choice.best.likeness === 3) return elsewhere(choice.best.receipt).every(({ likeness }) => likeness > 1);
+  const repeated = choice.delivery.doubles.length > 0;
+  return isFirstChoice(choice, elsewhere) && (!repeated || isRepeatedAlone(desk, choice, elsewhere));
+}
+
+/** No other receipt of the claim would serve it as well, while the best one serves another shipment. */
+function isFirstChoice({ claim, best, delivery }: Choice, elsewhere: Elsewhere): boolean {
+  const ofBest = elsewhere(best.receipt);
   const declared = declaredOf(claim);
   return delivery.parts.every((other) =>
-    near(other).every(({ shipment }) => {
-      const fits = elsewhere.some((candidate) => candidate.shipment === shipment);
+    elsewhere(other).every(({ shipment }) => {
+      const fits = ofBest.some((candidate) => candidate.shipment === shipment);
       if (other === best.receipt || !fits || likenessOf(declared, other.contents) === 3) return true;
       const asRead =
         unitsApart(declared, best.receipt.contents) + unitsApart(shipment.contents, other.contents);
@@ -74,40 +76,21 @@ function isSound({ claim, best, delivery }: Choice, near: Elsewhere): boolean {
 }
 
 /**
- * What looks entered twice may be two loads, one under a mistyped reference: so it is when a shipment with a
- * near reference and the same contents has come to nothing by any other reading.
+ * What looks entered twice may be two loads, one under a mistyped reference. The double entry is told either
+ * way; whose receipt it is has a rival when a shipment with a near reference and the same contents is overdue by the lane's habit.
  */
-function doublesAreSound(
-  { delivery }: Choice,
-  near: Elsewhere,
-  isMissing: (shipment: Paper) => boolean,
-): boolean {
-  return delivery.doubles.every(({ receipt, of }) =>
-    [receipt, of].every((one) =>
-      near(one).every(({ shipment, likeness, usual }) => likeness > 0 || !usual || !isMissing(shipment)),
-    ),
-  );
+function isRepeatedAlone(desk: Desk, { best, delivery }: Choice, elsewhere: Elsewhere): boolean {
+  const isRival = ({ shipment, likeness, usual }: Candidate) =>
+    likeness === 0 && usual && !desk.mayStillCome(shipment);
+  const receipts = [best.receipt, ...delivery.doubles.map(({ receipt }) => receipt)];
+  return receipts.every((receipt) => !elsewhere(receipt).some(isRival));
 }
 
-/** Neither claimed, nor possibly still on its way, nor counted without a reference. */
-function missingShipments(desk: Desk, doubts: readonly Doubt[]): (shipment: Paper) => boolean {
-  const claimed = new Set(doubts.flatMap(({ claim }) => claim.shipments));
-  const unnamed = new Map<string, Paper[]>();
-  const placeOf = ({ lane, contents }: Paper) => `${lane}\u0000${contents.signature}`;
-  for (const receipt of desk.openReceipts()) {
-    if (receipt.reference) continue;
-    unnamed.set(placeOf(receipt), [...(unnamed.get(placeOf(receipt)) ?? []), receipt]);
-  }
-  return (shipment) =>
-    !claimed.has(shipment) &&
-    !desk.mayStillCome(shipment) &&
-    !(unnamed.get(placeOf(shipment)) ?? []).some((receipt) => inWindow(desk.windowDays, shipment, receipt));
-}
-
-function leaveOpen(desk: Desk, { claim, delivery }: Doubt, tellDoubles: boolean): Candidate[] {
-  const twins = delivery.doubles.filter(({ of }) => likenessOf(declaredOf(claim), of.contents) < 2);
-  if (tellDoubles) for (const { receipt, of } of twins) desk.double(receipt, of);
-  const receipts = tellDoubles ? delivery.parts : [...delivery.parts, ...twins.map(({ receipt }) => receipt)];
-  const ranked = rank(desk, claim, receipts);
+/** What a person has to decide; double entries are told all the same. */
+function leaveOpen(desk: Desk, { claim, delivery }: Doubt): Candidate[] {
+  const declared = declaredOf(claim);
+  for (const { receipt, of } of delivery.doubles)
+    if (desk.isOpen(receipt) && likenessOf(declared, of.contents) < 2) desk.double(receipt, of);
+  const ranked = rank(desk, claim, delivery.parts);
   return claim.shipments.flatMap((shipment) => ranked.map((candidate) => ({ ...candidate, shipment })));
 }

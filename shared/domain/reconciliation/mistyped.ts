@@ -26,8 +26,8 @@ export function settleMistyped(desk: Desk, doubts: readonly Doubt[], near: NearS
     (candidate) => mayMatch(candidate) && !undecided.has(candidate.receipt),
   );
   for (const { receipt } of settled) for (const twin of again.get(receipt) ?? []) desk.double(twin, receipt);
-  const open = doubts.filter(({ claim }) =>
-    [...claim.shipments, ...claim.receipts].every((p) => desk.isOpen(p)),
+  const open = doubts.filter(({ claim, delivery }) =>
+    [...claim.shipments, ...delivery.parts].every((paper) => desk.isOpen(paper)),
   );
   const stillInDoubt = settleDoubts(desk, open, alternatives);
   return [...stillInDoubt, ...found];

@@ -37,7 +37,8 @@ function isPlain(claim: Claim, { parts, split, doubles }: Delivery): boolean {
 
 export function accept(desk: Desk, claim: Claim, delivery: Delivery): void {
   desk.pair({ shipments: claim.shipments, receipts: delivery.parts, rule: ruleOf(claim, delivery) });
-  for (const { receipt, of } of delivery.doubles) if (delivery.parts.includes(of)) desk.double(receipt, of);
+  for (const { receipt, of } of delivery.doubles)
+    if (desk.isOpen(receipt) && delivery.parts.includes(of)) desk.double(receipt, of);
   const [shipment, receipt] = [claim.shipments[0], delivery.parts[0]];
   if (shipment && receipt) desk.usual.learn(shipment.lane, receipt.day - shipment.day);
 }

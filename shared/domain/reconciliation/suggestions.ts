@@ -8,6 +8,7 @@ const MOST_FOR_ONE = 3;
 
 // How much each step of likeness takes from a candidate's weight, and the weight of "none of these".
 const BY_LIKENESS = [1, 0.1, 0.02, 0.005] as const;
+const BY_NAME = 4;
 const NONE_OF_THESE = 0.05;
 
 interface Weighed {
@@ -46,8 +47,10 @@ export function suggest(desk: Desk, candidates: readonly Candidate[]): Suggestio
     }));
 }
 
-const weigh = (desk: Desk, { shipment, receipt, likeness }: Candidate): number =>
-  BY_LIKENESS[likeness] * desk.usual.share(shipment.lane, receipt.day - shipment.day);
+const weigh = (desk: Desk, { shipment, receipt, likeness, rule }: Candidate): number =>
+  (rule === 'same reference' ? BY_NAME : 1) *
+  BY_LIKENESS[likeness] *
+  desk.usual.share(shipment.lane, receipt.day - shipment.day);
 
 /** A pair that several rules offer is offered by the first, the strongest. */
 function distinct(candidates: Candidate[]): Candidate[] {
