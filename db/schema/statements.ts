@@ -1,4 +1,5 @@
 import { bigint, index, int, mysqlTable, uniqueIndex, varchar } from 'drizzle-orm/mysql-core';
+import type { LineComponent } from '@/shared/domain/statement/components';
 import { amount, code, day, id, instant, json, month, rate, units } from '../columns';
 import { companies, people } from './companies';
 import { disputes } from './differences';
@@ -47,18 +48,6 @@ export const statements = mysqlTable(
     index('statements_by_month').on(table.month, table.companyId),
   ],
 );
-
-export const lineComponents = [
-  'deposits asked',
-  'deposits released',
-  'daily fee',
-  'lost',
-  'found again',
-  'damage',
-  'cleaning',
-  'credit',
-] as const;
-export type LineComponent = (typeof lineComponents)[number];
 
 /** A line of money. `accountMonth` differs from the statement's month for a correction. Never changed once issued. */
 export const statementLines = mysqlTable(
