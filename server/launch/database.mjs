@@ -42,8 +42,6 @@ function endWithDatabase({ isUp }) {
 export async function fillDatabase(root, env) {
   const tsx = join(root, 'node_modules/.bin/tsx');
   await step('Migrations: tables and rights', () => runProgram(tsx, ['db/run-migrations.ts'], { env }));
-  await step('Demo: people, shipments and months', async () => {
-    const printed = (await runProgram(tsx, ['seeds/run.ts'], { env })).trim();
-    if (printed) say(printed);
-  });
+  const onLine = (/** @type {string} */ line) => say(line.trim());
+  await step('Demo: people, shipments and months', () => runProgram(tsx, ['seeds/run.ts'], { env, onLine }));
 }

@@ -18,8 +18,6 @@ runUntilEnded(async () => {
     return waitForHealth({ port, reach, milliseconds: 60_000 });
   });
   console.log(`\n  Ready after ${seconds(performance.now())} at http://${reach}:${port}\n`);
-  const people = signInLines(join(root, 'seeds/demo/sign-ins.json'));
-  if (people.length > 0)
-    console.log(['Demo sign-ins:', ...people].map((line) => `  ${line}`).join('\n'), '\n');
-  console.log('  The server’s log is .local/server.log. Ctrl-C stops all of it.');
+  for (const line of signInLines(join(root, 'seeds/demo/sign-ins.json'))) console.log(`  ${line}`);
+  console.log('\n  The server’s log is .local/server.log. Ctrl-C stops all of it.');
 });
