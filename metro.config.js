@@ -4,14 +4,31 @@ const { getDefaultConfig } = require('expo/metro-config');
 
 const config = getDefaultConfig(__dirname);
 
-// The bundle takes one of zod's languages instead of all of them.
+const here = (file) => ({ type: 'sourceFile', filePath: path.join(__dirname, file) });
+const nothing = { type: 'empty' };
+
+// What the first load leaves out, by who asks and for what: navigators and link previews of the router (the app has
+// one Slot, and links of its own), animated lists and old touchables of the components (the app has none), and all of
+// zod's languages but one. Whoever needs one of them takes its line out and looks at the size of the first load.
+const leftOut = [
+  [/^zod\//, /(^|\/)locales(\/index\.c?js)?$/, here('components/data/zod-locales.ts')],
+  [/^expo-router\/build\//, /\/layouts\/StackClient$/, here('components/shell/slot-router.ts')],
+  [/^expo-router\/build\//, /^\.\/(stack|color|layouts\/(Tabs|experimental-stack))$/, nothing],
+  [/^expo-router\/build\//, /(^|\/)(react-navigation\/(bottom-tabs|elements)|native-tabs(\/\w+)?)$/, nothing],
+  [/^expo-router\/build\/ExpoRoot/, /^\.\/screensFeatureFlags$/, here('components/shell/slot-router.ts')],
+  [/^expo-router\/build\/link\//, /^\.\/(elements|LinkWithPreview)$/, nothing],
+  [
+    /^(react-native-web|expo|expo-router|react-native-screens)\//,
+    /(exports|\.\.)\/(Animated|FlatList|SectionList|VirtualizedList|Touchable\w+|LayoutAnimation|Modal|RefreshControl|CheckBox|ProgressBar)$/,
+    nothing,
+  ],
+];
+
 const resolveAsUsual = config.resolver.resolveRequest;
 config.resolver.resolveRequest = (context, name, platform) => {
-  const fromZod = /[\\/]node_modules[\\/]zod[\\/]/.test(context.originModulePath);
-  if (fromZod && /(^|\/)locales(\/index\.c?js)?$/.test(name)) {
-    return { type: 'sourceFile', filePath: path.join(__dirname, 'components/data/zod-locales.ts') };
-  }
-  return (resolveAsUsual ?? context.resolveRequest)(context, name, platform);
+  const asker = context.originModulePath.replaceAll('\\', '/').split('/node_modules/').pop() ?? '';
+  const found = leftOut.find(([who, what]) => who.test(asker) && what.test(name));
+  return found ? found[2] : (resolveAsUsual ?? context.resolveRequest)(context, name, platform);
 };
 
 // Server-side folders never belong to the bundle, and their churn should not wake the watcher.
