@@ -123,43 +123,71 @@ describe('the curve', () => {
 
 describe('what cannot be sized is refused with its code and place', () => {
   const good = anInput();
+  const ofPart = (perDay: { mean: number; sd: number }) => anInput({ perDay });
+  const halfAPart = [{ ...good.flows[0], unitsPerContainer: 0.5 }];
+  const misread = 'input not understood';
   it.each([
-    ['nothing at all', null, 'input not understood', ''],
-    ['no parts', { ...good, flows: [] }, 'input not understood', 'flows'],
-    ['no legs', { ...good, legs: [] }, 'input not understood', 'legs'],
-    [
-      'negative demand',
-      anInput({ perDay: { mean: -1, sd: 0 } }),
-      'input not understood',
-      'flows.0.unitsPerDay.mean',
-    ],
-    [
-      'demand not a number',
-      anInput({ perDay: { mean: NaN, sd: 0 } }),
-      'input not understood',
-      'flows.0.unitsPerDay.mean',
-    ],
-    ['no demand', anInput({ perDay: { mean: 0, sd: 0 } }), 'nothing goes out', 'flows'],
-    ['no time', anInput({ days: { mean: 0, sd: 0 } }), 'no time in the loop', 'legs'],
-    [
-      'a leg of 0 days that varies',
-      anInput({ days: { mean: 0, sd: 1 } }),
-      'input not understood',
-      'legs.0.days.sd',
-    ],
-    ['certain cover', { ...good, coverProbability: 1 }, 'input not understood', 'coverProbability'],
-    ['no cover', { ...good, coverProbability: 0 }, 'input not understood', 'coverProbability'],
-    ['all held', { ...good, heldPct: 60, repairPct: 40 }, 'no unit left to use', 'heldPct'],
-    ['another way to travel', { ...good, travel: 'apart' }, 'input not understood', 'travel'],
-    [
-      'half a part in a container',
-      { ...good, flows: [{ ...good.flows[0], unitsPerContainer: 0.5 }] },
-      'input not understood',
-      'flows.0.unitsPerContainer',
-    ],
-    ['a tail of centuries', anInput({ days: { mean: 1, sd: 300 } }), 'loop time spreads too widely', 'legs'],
-    ['a pool beyond any plant', anInput({ perDay: { mean: 1e8, sd: 0 } }), 'figures too large', ''],
-  ])('%s', (_about, input, code, at) => {
+    { about: 'nothing at all', input: null, code: misread, at: '' },
+    { about: 'no parts', input: { ...good, flows: [] }, code: misread, at: 'flows' },
+    { about: 'no legs', input: { ...good, legs: [] }, code: misread, at: 'legs' },
+    {
+      about: 'negative demand',
+      input: ofPart({ mean: -1, sd: 0 }),
+      code: misread,
+      at: 'flows.0.unitsPerDay.mean',
+    },
+    {
+      about: 'no number',
+      input: ofPart({ mean: NaN, sd: 0 }),
+      code: misread,
+      at: 'flows.0.unitsPerDay.mean',
+    },
+    { about: 'no demand', input: ofPart({ mean: 0, sd: 0 }), code: 'nothing goes out', at: 'flows' },
+    {
+      about: 'no time',
+      input: anInput({ days: { mean: 0, sd: 0 } }),
+      code: 'no time in the loop',
+      at: 'legs',
+    },
+    {
+      about: 'spread on 0 days',
+      input: anInput({ days: { mean: 0, sd: 1 } }),
+      code: misread,
+      at: 'legs.0.days.sd',
+    },
+    {
+      about: 'certain cover',
+      input: { ...good, coverProbability: 1 },
+      code: misread,
+      at: 'coverProbability',
+    },
+    { about: 'no cover', input: { ...good, coverProbability: 0 }, code: misread, at: 'coverProbability' },
+    {
+      about: 'all held or in repair',
+      input: { ...good, heldPct: 60, repairPct: 40 },
+      code: 'no unit left to use',
+      at: 'heldPct',
+    },
+    { about: 'an unknown way to travel', input: { ...good, travel: 'apart' }, code: misread, at: 'travel' },
+    {
+      about: 'half a part in a container',
+      input: { ...good, flows: halfAPart },
+      code: misread,
+      at: 'flows.0.unitsPerContainer',
+    },
+    {
+      about: 'a tail of centuries',
+      input: anInput({ days: { mean: 1, sd: 300 } }),
+      code: 'loop time spreads too widely',
+      at: 'legs',
+    },
+    {
+      about: 'a pool beyond any plant',
+      input: ofPart({ mean: 1e8, sd: 0 }),
+      code: 'figures too large',
+      at: '',
+    },
+  ])('$about', ({ input, code, at }) => {
     expect(() => sizePool(input)).toThrow(CannotSize);
     expect(() => sizePool(input)).toThrow(expect.objectContaining({ code, at }));
   });
