@@ -1,10 +1,13 @@
 import type { Deps } from './deps';
 import type { Limits } from './http/rate-limit';
 import type { Route } from './http/route';
+import { differenceRoutes } from './modules/differences/router';
+import { fileRoutes } from './modules/files/router';
 import { healthRoutes } from './modules/health/router';
 import { sessionRoutes } from './modules/session/router';
+import { shipmentRoutes } from './modules/shipments/router';
 
 /** Every route of the product, by noun. */
 export function allRoutes(_deps: Deps, limits: Limits): Route[] {
-  return [...healthRoutes, ...sessionRoutes(limits)];
+  return [...healthRoutes, ...sessionRoutes(limits), ...differenceRoutes, ...fileRoutes, ...shipmentRoutes];
 }

@@ -13,6 +13,7 @@ const table = {
   'see shipments': ['coordinator', 'engineer', 'finance', 'administrator', 'auditor', 'clerk', 'manager'],
   'send shipments': ['coordinator', 'clerk'],
   'count shipments': ['coordinator', 'clerk'],
+  'send files': ['coordinator', 'finance', 'clerk', 'manager'],
   'see balances': ['coordinator', 'engineer', 'finance', 'administrator', 'auditor', 'clerk', 'manager'],
   'adjust stock': ['coordinator'],
   'see differences': ['coordinator', 'finance', 'auditor'],
@@ -44,7 +45,7 @@ const table = {
   'keep partners': ['administrator'],
   'see people': ['administrator', 'auditor', 'manager'],
   'keep people': ['administrator'],
-  'keep own people': ['manager'],
+  'invite people': ['administrator', 'manager'],
   'read log': ['administrator', 'auditor'],
   'read captured mail': ['administrator'],
 } as const satisfies Record<string, readonly Role[]>;

@@ -1,14 +1,18 @@
 import { fields } from './en/fields';
+import { imports } from './en/imports';
 import { problems } from './en/problems';
 import { session } from './en/session';
 import { shell } from './en/shell';
+import { shipments } from './en/shipments';
 import { ui } from './en/ui';
 
 /** Every text shown to people, by area. Another language is another set of the same shape. */
 export const text = {
   fields,
+  imports,
   problems,
   session,
   shell,
+  shipments,
   ui,
 } as const;
