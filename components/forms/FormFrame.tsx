@@ -112,7 +112,7 @@ export function FormFrame<Schema extends z.ZodType>({
       label={submitLabel}
       busy={busy}
       {...(disabled ? { disabled } : {})}
-      full={inBar === true && !wide}
+      full={!wide}
       onPress={() => void send()}
     />
   );

@@ -42,5 +42,5 @@ export function Box({ children, gap = 'm', row, wrap, align, spread, grow, pad, 
 
 const styles = StyleSheet.create({
   // Static, so that a link that stretches over its card is not held in by what stands around it.
-  box: { minWidth: 0, position: 'static' },
+  box: { minWidth: 0, maxWidth: '100%', flexShrink: 1, position: 'static' },
 });

@@ -15,7 +15,7 @@ import { Text } from './Text';
 export type Series = { key: string; label: string; tone: Tone; dashed?: boolean; points: readonly Point[] };
 export type Marker = { key: string; x: number; label: string; tone: Tone };
 
-type Props = {
+export type LineChartProps = {
   label: string;
   /** The curve in one or two sentences, for those who do not see it. */
   summary: string;
@@ -30,7 +30,7 @@ type Props = {
 const height = 300;
 
 /** Curves over one axis, with marker lines; the same numbers stand in a table that can be opened. */
-export function LineChart(props: Props) {
+export function LineChart(props: LineChartProps) {
   const { label, summary, series } = props;
   return (
     <Box gap="s">
@@ -52,7 +52,7 @@ function Plot({
   yMost = 1,
   formatX = String,
   formatY = formatNumber,
-}: Props) {
+}: LineChartProps) {
   const [width, setWidth] = useState(640);
   const all = series.flatMap((each) => each.points);
   if (all.length === 0) return null;
@@ -130,7 +130,7 @@ function MarkerLine({ marker, x, end, top }: { marker: Marker; x: number; end: b
   );
 }
 
-function Numbers({ label, xHead, series, formatX = String, formatY = formatNumber }: Props) {
+function Numbers({ label, xHead, series, formatX = String, formatY = formatNumber }: LineChartProps) {
   const rows = [...new Set(series.flatMap((each) => each.points.map((point) => point.x)))].sort(
     (a, b) => a - b,
   );

@@ -1,5 +1,6 @@
 import { fields } from './en/fields';
 import { imports } from './en/imports';
+import { gallery } from './en/gallery';
 import { problems } from './en/problems';
 import { session } from './en/session';
 import { shell } from './en/shell';
@@ -10,6 +11,7 @@ import { ui } from './en/ui';
 export const text = {
   fields,
   imports,
+  gallery,
   problems,
   session,
   shell,

@@ -1,0 +1,3 @@
+import { GalleryScreen } from '@/components/gallery/GalleryScreen';
+
+export default GalleryScreen;
