@@ -2,7 +2,7 @@ import { poolCurve, type PoolInput, sizePool, travelModes } from '@/shared/domai
 
 /** Work may grow about in line with the containers in the loop: at most 12 times for ten times as many. */
 const MOST = 12;
-const CALLS = 50;
+const CALLS = 300;
 const RUNS = 9;
 
 export interface PoolSizeFigures {
