@@ -4,10 +4,22 @@ import type { Route } from './http/route';
 import { differenceRoutes } from './modules/differences/router';
 import { fileRoutes } from './modules/files/router';
 import { healthRoutes } from './modules/health/router';
+import { logRoutes } from './modules/log/router';
+import { partnerRoutes } from './modules/partners/router';
+import { peopleRoutes } from './modules/people/router';
 import { sessionRoutes } from './modules/session/router';
 import { shipmentRoutes } from './modules/shipments/router';
 
 /** Every route of the product, by noun. */
 export function allRoutes(_deps: Deps, limits: Limits): Route[] {
-  return [...healthRoutes, ...sessionRoutes(limits), ...differenceRoutes, ...fileRoutes, ...shipmentRoutes];
+  return [
+    ...healthRoutes,
+    ...sessionRoutes(limits),
+    ...partnerRoutes,
+    ...peopleRoutes,
+    ...logRoutes,
+    ...differenceRoutes,
+    ...fileRoutes,
+    ...shipmentRoutes,
+  ];
 }

@@ -8,6 +8,7 @@ import { instantOf } from '../deps';
 export type Mailer = Pick<Transporter, 'sendMail'> | null;
 const leaseMs = 120_000;
 const mostAttempts = 8;
+const carriesLink = new Set(['reset link', 'invitation']);
 
 /** The transport of SMTP_URL; without one, messages are captured for the administrator to read. */
 export function mailerOf(smtpUrl: string | undefined): Mailer {

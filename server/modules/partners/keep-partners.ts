@@ -11,7 +11,10 @@ import { Problem } from '@/shared/problems/problems';
 type New<Operation> = { body: BodyOf<Operation>; now: string };
 
 /** A partner and its first site; both codes must be new. */
-export async function addPartnerWithSite(tx: Transaction, { body, now }: New<typeof addPartner>): Promise<string> {
+export async function addPartnerWithSite(
+  tx: Transaction,
+  { body, now }: New<typeof addPartner>,
+): Promise<string> {
   const companyId = newId();
   const { code, name, currency, email, address, gln } = body;
   await unlessTaken('code', () =>
@@ -27,11 +30,20 @@ export async function addPartnerWithSite(tx: Transaction, { body, now }: New<typ
       createdAt: now,
     }),
   );
-  await insertSite(tx, { companyId, now, field: 'siteCode', site: { code: body.siteCode, name: body.siteName, gln: '', timeZone: body.timeZone } });
+  await insertSite(tx, {
+    companyId,
+    now,
+    field: 'siteCode',
+    site: { code: body.siteCode, name: body.siteName, gln: '', timeZone: body.timeZone },
+  });
   return companyId;
 }
 
-export async function changeCompany(tx: Transaction, id: string, body: BodyOf<typeof changePartner>): Promise<void> {
+export async function changeCompany(
+  tx: Transaction,
+  id: string,
+  body: BodyOf<typeof changePartner>,
+): Promise<void> {
   const [company] = await tx.select().from(companies).where(eq(companies.id, id)).for('update');
   if (!company) throw new Problem('not found');
   if (company.kind === 'operator' && !body.active) {
@@ -44,7 +56,11 @@ export async function changeCompany(tx: Transaction, id: string, body: BodyOf<ty
     .where(eq(companies.id, id));
 }
 
-export async function addSiteTo(tx: Transaction, companyId: string, { body, now }: New<typeof addSite>): Promise<string> {
+export async function addSiteTo(
+  tx: Transaction,
+  companyId: string,
+  { body, now }: New<typeof addSite>,
+): Promise<string> {
   const [company] = await tx.select({ id: companies.id }).from(companies).where(eq(companies.id, companyId));
   if (!company) throw new Problem('not found');
   return insertSite(tx, { companyId, now, field: 'code', site: body });
@@ -52,14 +68,26 @@ export async function addSiteTo(tx: Transaction, companyId: string, { body, now 
 
 type SiteAt = { companyId: string; siteId: string };
 
-export async function changeSiteOf(tx: Transaction, at: SiteAt, body: BodyOf<typeof changeSite>): Promise<void> {
+export async function changeSiteOf(
+  tx: Transaction,
+  at: SiteAt,
+  body: BodyOf<typeof changeSite>,
+): Promise<void> {
   const where = and(eq(sites.id, at.siteId), eq(sites.companyId, at.companyId));
   const [site] = await tx.select().from(sites).where(where).for('update');
   if (!site) throw new Problem('not found');
-  await tx.update(sites).set({ name: body.name, gln: body.gln || null, active: body.active }).where(where);
+  await tx
+    .update(sites)
+    .set({ name: body.name, gln: body.gln || null, active: body.active })
+    .where(where);
 }
 
-type NewSite = { companyId: string; now: string; field: string; site: z.output<typeof addSite.body & object> };
+type NewSite = {
+  companyId: string;
+  now: string;
+  field: string;
+  site: z.output<typeof addSite.body & object>;
+};
 
 async function insertSite(tx: Transaction, { companyId, now, field, site }: NewSite): Promise<string> {
   const id = newId();

@@ -16,21 +16,36 @@ export async function partnersPage(db: Database, query: QueryOf<typeof listPartn
     .where(
       and(
         query.kind ? eq(companies.kind, query.kind) : undefined,
-        query.search ? or(like(companies.name, likeText(query.search)), like(companies.code, likeText(query.search))) : undefined,
-        after ? or(gt(companies.name, after[0]), and(eq(companies.name, after[0]), gt(companies.id, after[1]))) : undefined,
+        query.search
+          ? or(like(companies.name, likeText(query.search)), like(companies.code, likeText(query.search)))
+          : undefined,
+        after
+          ? or(gt(companies.name, after[0]), and(eq(companies.name, after[0]), gt(companies.id, after[1])))
+          : undefined,
       ),
     )
     .orderBy(asc(companies.name), asc(companies.id))
     .limit(query.limit + 1);
   const numberOf = async (table: typeof sites | typeof people) =>
-    new Map((await db.select({ id: table.companyId, n: count() }).from(table).groupBy(table.companyId)).map(({ id, n }) => [id, n]));
+    new Map(
+      (await db.select({ id: table.companyId, n: count() }).from(table).groupBy(table.companyId)).map(
+        ({ id, n }) => [id, n],
+      ),
+    );
   const [siteNumbers, peopleNumbers] = [await numberOf(sites), await numberOf(people)];
-  const full = rows.map((row) => ({ ...row, sites: siteNumbers.get(row.id) ?? 0, people: peopleNumbers.get(row.id) ?? 0 }));
+  const full = rows.map((row) => ({
+    ...row,
+    sites: siteNumbers.get(row.id) ?? 0,
+    people: peopleNumbers.get(row.id) ?? 0,
+  }));
   return cutPage(full, query.limit, (row) => [row.name, row.id]);
 }
 
 export async function partnerWithSites(db: Database, id: string) {
   const [company] = await db.select().from(companies).where(eq(companies.id, id));
   if (!company) throw new Problem('not found');
-  return { ...company, sites: await db.select().from(sites).where(eq(sites.companyId, id)).orderBy(asc(sites.code)) };
+  return {
+    ...company,
+    sites: await db.select().from(sites).where(eq(sites.companyId, id)).orderBy(asc(sites.code)),
+  };
 }

@@ -1,0 +1,8 @@
+import { listLetters, listLog } from '@/shared/contracts/log';
+import { read, type Route } from '../../http/route';
+import { lettersPage, logPage } from './read-model';
+
+export const logRoutes: Route[] = [
+  read(listLog, 'read log', ({ db, query }) => logPage(db, query)),
+  read(listLetters, 'read captured mail', ({ db, query }) => lettersPage(db, query)),
+];

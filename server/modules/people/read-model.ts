@@ -1,0 +1,64 @@
+import { and, asc, eq, gt, inArray, isNotNull, isNull, like, or } from 'drizzle-orm';
+import type { Database } from '@/db/client';
+import { companies, people, personRoles } from '@/db/schema/companies';
+import type { listPeople, PersonRow } from '@/shared/contracts/people';
+import type { QueryOf } from '@/shared/contracts/operation';
+import { cursor, cutPage } from '../../http/page';
+import { type Person, scopeOf } from '../../http/person';
+import { likeText } from '../../http/search';
+
+const stateIs = {
+  active: and(eq(people.active, true), isNotNull(people.passwordHash)),
+  invited: and(eq(people.active, true), isNull(people.passwordHash)),
+  disabled: eq(people.active, false),
+};
+
+/** People by name, a page by key; a partner sees its own company's only. */
+export async function peoplePage(db: Database, person: Person, query: QueryOf<typeof listPeople>) {
+  const after = cursor(query.after, 2);
+  const company = scopeOf(person) ?? query.company;
+  const found = await db
+    .select({ person: people, company: { id: companies.id, name: companies.name, kind: companies.kind } })
+    .from(people)
+    .innerJoin(companies, eq(companies.id, people.companyId))
+    .where(
+      and(
+        company ? eq(people.companyId, company) : undefined,
+        query.state ? stateIs[query.state] : undefined,
+        query.search
+          ? or(like(people.name, likeText(query.search)), like(people.email, likeText(query.search)))
+          : undefined,
+        after
+          ? or(gt(people.name, after[0]), and(eq(people.name, after[0]), gt(people.id, after[1])))
+          : undefined,
+      ),
+    )
+    .orderBy(asc(people.name), asc(people.id))
+    .limit(query.limit + 1);
+  const roles = await rolesOf(
+    db,
+    found.map((row) => row.person.id),
+  );
+  const rows = found.map((row): PersonRow => ({
+    id: row.person.id,
+    name: row.person.name,
+    email: row.person.email,
+    company: row.company,
+    roles: roles.get(row.person.id) ?? [],
+    state: !row.person.active ? 'disabled' : row.person.passwordHash === null ? 'invited' : 'active',
+    lastSignedInAt: row.person.lastSignedInAt,
+  }));
+  return cutPage(rows, query.limit, (row) => [row.name, row.id]);
+}
+
+async function rolesOf(db: Database, ids: string[]): Promise<Map<string, PersonRow['roles']>> {
+  const held = new Map<string, PersonRow['roles']>();
+  if (ids.length === 0) return held;
+  for (const { personId, role } of await db
+    .select()
+    .from(personRoles)
+    .where(inArray(personRoles.personId, ids))) {
+    held.set(personId, [...(held.get(personId) ?? []), role]);
+  }
+  return held;
+}
