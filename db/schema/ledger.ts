@@ -75,6 +75,7 @@ export const ledgerEntries = mysqlTable(
   (table) => [
     index('ledger_entries_shipment').on(table.shipmentId, table.id),
     index('ledger_entries_day').on(table.valueDate, table.id),
+    index('ledger_entries_corrects').on(table.correctsEntryId),
   ],
 );
 

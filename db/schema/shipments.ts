@@ -41,6 +41,7 @@ export const shipments = mysqlTable(
     index('shipments_to').on(table.toCompanyId, table.state, table.expectedOn, table.id),
     index('shipments_from').on(table.fromCompanyId, table.state, table.expectedOn, table.id),
     index('shipments_left').on(table.leftOn, table.id),
+    index('shipments_counted').on(table.countedOn, table.leftOn),
     index('shipments_state').on(table.state, table.expectedOn, table.id),
   ],
 );
