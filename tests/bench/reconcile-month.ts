@@ -2,7 +2,15 @@ import { addDays } from '@/shared/domain/calendar';
 import type { ReconciliationInput } from '@/shared/domain/reconciliation';
 import { type Draw, drawFrom, shuffled } from './reconcile-draw';
 import { cutInTwo, joinReferences, type Line, merged, miscount, mistype, restyle } from './reconcile-spoil';
-import { FIRST_DAY, LAST_DAY, makeShipments, makeWorld, DAYS, type Shipment, type World } from './reconcile-world';
+import {
+  FIRST_DAY,
+  LAST_DAY,
+  makeShipments,
+  makeWorld,
+  DAYS,
+  type Shipment,
+  type World,
+} from './reconcile-world';
 
 /** A made-up month and the truth about it (RULES 5, its measure). */
 export interface Month {
@@ -32,9 +40,18 @@ export function makeMonth({ seed, shipments: count, lanes }: MonthSettings): Mon
   const { shipments, nextRef } = makeShipments(draw, world, count);
   const slips = receiveAll(draw, world, shipments);
   for (let n = 0; n < count; n += 1) if (draw.chance(0.003)) slips.push(unannounced(draw, world, nextRef));
-  const counted = slips.filter(({ date }) => date <= LAST_DAY).sort((a, b) => (a.date < b.date ? -1 : a.date > b.date ? 1 : 0));
+  const counted = slips
+    .filter(({ date }) => date <= LAST_DAY)
+    .sort((a, b) => (a.date < b.date ? -1 : a.date > b.date ? 1 : 0));
   const receipts = counted.map((slip, at) => ({ slip, id: `R${at + 1}` }));
-  const listed = receipts.map(({ id, slip: { ref, from, to, date, lines } }) => ({ id, ref, from, to, date, lines }));
+  const listed = receipts.map(({ id, slip: { ref, from, to, date, lines } }) => ({
+    id,
+    ref,
+    from,
+    to,
+    date,
+    lines,
+  }));
   return {
     input: {
       asOf: LAST_DAY,
@@ -44,7 +61,9 @@ export function makeMonth({ seed, shipments: count, lanes }: MonthSettings): Mon
       receipts: shuffled(draw, listed),
     },
     truth: {
-      pairs: receipts.flatMap(({ id, slip }) => (slip.double ? [] : slip.of.map((s): [string, string] => [s, id]))),
+      pairs: receipts.flatMap(({ id, slip }) =>
+        slip.double ? [] : slip.of.map((s): [string, string] => [s, id]),
+      ),
       duplicates: receipts.filter(({ slip }) => slip.double).map(({ id }) => id),
     },
   };
@@ -84,7 +103,9 @@ function receive(draw: Draw, world: World, loads: Shipment[]): Slip[] {
       of: loads.map(({ id }) => id),
       double: false,
     };
-    return slip.ref !== null && draw.chance(0.004) ? [slip, enteredAgain(draw, slip, slip.ref)] : [slip];
+    // Half of a load entered twice is not told from two halves: RULES 5 calls that a split delivery.
+    const covers = parts.length === 1 && slip.ref !== null;
+    return covers && draw.chance(0.004) ? [slip, enteredAgain(draw, slip)] : [slip];
   });
 }
 
@@ -103,18 +124,16 @@ function bookedAt(draw: Draw, world: World, { from, to }: Shipment): { from: str
   return world.plants.includes(to) ? { from, to: other(to) } : { from: other(from), to };
 }
 
-const enteredAgain = (draw: Draw, slip: Slip, ref: string): Slip => ({
+const enteredAgain = (draw: Draw, slip: Slip): Slip => ({
   ...slip,
-  ref: draw.chance(0.3) ? restyle(draw, ref) : ref,
+  ref: slip.ref !== null && slip.of.length === 1 && draw.chance(0.3) ? restyle(draw, slip.ref) : slip.ref,
   date: addDays(slip.date, draw.whole(0, 1)),
   double: true,
 });
 
 function unannounced(draw: Draw, world: World, nextRef: (from: string) => string): Slip {
   const { from, to, standing } = draw.one(world.lanes);
-  const lines = draw.chance(0.5)
-    ? standing
-    : [{ type: draw.one(world.types), quantity: draw.whole(4, 200) }];
+  const lines = draw.chance(0.5) ? standing : [{ type: draw.one(world.types), quantity: draw.whole(4, 200) }];
   const ref = draw.one([null, nextRef(from), `${draw.whole(100_000, 999_999)}`]);
   const date = addDays(FIRST_DAY, draw.whole(0, DAYS - 1));
   return { ref, from, to, date, lines: lines.map((line) => ({ ...line })), of: [], double: false };

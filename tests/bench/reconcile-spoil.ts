@@ -5,7 +5,16 @@ export interface Line {
   quantity: number;
 }
 
-const LOOK_ALIKES: Record<string, string> = { '0': 'O', '1': 'I', '5': 'S', '8': 'B', O: '0', I: '1', S: '5', B: '8' };
+const LOOK_ALIKES: Record<string, string> = {
+  '0': 'O',
+  '1': 'I',
+  '5': 'S',
+  '8': 'B',
+  O: '0',
+  I: '1',
+  S: '5',
+  B: '8',
+};
 
 const put = (text: string, at: number, { cut, by }: { cut: number; by: string }) =>
   text.slice(0, at) + by + text.slice(at + cut);
@@ -53,7 +62,8 @@ const clone = (lines: readonly Line[]) => lines.map((line) => ({ ...line }));
 export function miscount(draw: Draw, lines: readonly Line[], types: readonly string[]): Line[] {
   const counted = clone(lines);
   for (const line of counted) {
-    if (draw.chance(0.03)) line.quantity = Math.max(1, line.quantity + draw.one([-8, -5, -3, -2, -1, 1, 2, 3, 5]));
+    if (draw.chance(0.03))
+      line.quantity = Math.max(1, line.quantity + draw.one([-8, -5, -3, -2, -1, 1, 2, 3, 5]));
     if (draw.chance(0.005)) line.type = draw.one(types.filter((type) => type !== line.type));
   }
   return merged(counted);
@@ -67,7 +77,10 @@ export function cutInTwo(draw: Draw, lines: readonly Line[]): [Line[], Line[]] {
   }
   const share = draw.one([0.5, 0.5, 0.4, 0.6, 0.7, 0.25]);
   const first = lines.map(({ type, quantity }) => ({ type, quantity: Math.floor(quantity * share) }));
-  const second = lines.map(({ type, quantity }, at) => ({ type, quantity: quantity - (first[at]?.quantity ?? 0) }));
+  const second = lines.map(({ type, quantity }, at) => ({
+    type,
+    quantity: quantity - (first[at]?.quantity ?? 0),
+  }));
   const filled = (part: Line[]) => part.filter(({ quantity }) => quantity > 0);
   return [filled(first), filled(second)];
 }

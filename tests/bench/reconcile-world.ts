@@ -74,7 +74,11 @@ const padOf = (draw: Draw): Pad => ({
 const write = ({ prefix, width }: Pad, number: number) => prefix + String(number).padStart(width, '0');
 
 /** Shipments of a month in order; each sender tears its references off one pad, some sheets go elsewhere. */
-export function makeShipments(draw: Draw, world: World, count: number): { shipments: Shipment[]; nextRef: (from: string) => string } {
+export function makeShipments(
+  draw: Draw,
+  world: World,
+  count: number,
+): { shipments: Shipment[]; nextRef: (from: string) => string } {
   const pads = new Map<string, Pad>();
   const nextRef = (from: string) => {
     const pad = pads.get(from) ?? padOf(draw);

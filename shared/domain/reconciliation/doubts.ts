@@ -54,9 +54,15 @@ function clearBest(ranked: Candidate[]): Candidate | null {
 
 function isSound(desk: Desk, choice: Choice, elsewhere: Elsewhere): boolean {
   if (choice.best.likeness === 3) return elsewhere(choice.best.receipt).every(({ likeness }) => likeness > 1);
+  const late = !choice.best.usual && isOutdone(choice.best, elsewhere);
+  if (late) return false;
   const repeated = choice.delivery.doubles.length > 0;
   return isFirstChoice(choice, elsewhere) && (!repeated || isRepeatedAlone(desk, choice, elsewhere));
 }
+
+/** Too long on the way for its lane, while a shipment with a near reference holds the same and is in time. */
+const isOutdone = (best: Candidate, elsewhere: Elsewhere): boolean =>
+  elsewhere(best.receipt).some(({ likeness, usual }) => usual && likeness <= best.likeness);
 
 /** No other receipt of the claim would serve it as well, while the best one serves another shipment. */
 function isFirstChoice({ claim, best, delivery }: Choice, elsewhere: Elsewhere): boolean {

@@ -33,8 +33,8 @@ export function settleMistyped(desk: Desk, doubts: readonly Doubt[], near: NearS
   return [...stillInDoubt, ...found];
 }
 
-const mayMatch = ({ rule, likeness }: Candidate): boolean =>
-  rule === 'other site' ? likeness === 0 : rule === 'near reference' && likeness < 3;
+const mayMatch = ({ rule, likeness, usual }: Candidate): boolean =>
+  rule === 'other site' ? likeness === 0 : rule === 'near reference' && likeness < 3 && usual;
 
 /** Of receipts with one reference, lane and contents, a day apart at most, only the first seeks a shipment. */
 function firstEntries(

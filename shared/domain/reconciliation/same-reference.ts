@@ -17,14 +17,24 @@ const ruleOf = ({ shipments }: Claim, { split }: Delivery): RuleName =>
 
 /** Settles the claims that are plain, and returns those that are not. */
 export function settlePlainClaims(desk: Desk, claims: readonly Claim[]): Doubt[] {
-  const doubts: Doubt[] = [];
-  for (const claim of claims) {
-    const delivery = readDelivery(declaredOf(claim), claim.receipts);
-    if (isPlain(claim, delivery)) accept(desk, claim, delivery);
-    else doubts.push({ claim, delivery });
-  }
-  return doubts;
+  const read = claims.map((claim) => ({ claim, delivery: readDelivery(declaredOf(claim), claim.receipts) }));
+  const plain = read.filter(({ claim, delivery }) => isPlain(claim, delivery));
+  for (const { claim, delivery } of plain)
+    for (const { lane, days } of onTheWay(claim, delivery)) desk.usual.learn(lane, days);
+  const settled = new Set(
+    plain.filter((one) =>
+      onTheWay(one.claim, one.delivery).every(({ lane, days }) => desk.usual.isUsual(lane, days)),
+    ),
+  );
+  for (const { claim, delivery } of settled) accept(desk, claim, delivery);
+  return read.filter((one) => !settled.has(one));
 }
+
+/** The days from the shipment to its first receipt; a split may take longer than the lane is used to. */
+const onTheWay = ({ shipments }: Claim, { parts, split }: Delivery): { lane: string; days: number }[] => {
+  const [shipment, receipt] = [shipments[0], parts[0]];
+  return shipment && receipt && !split ? [{ lane: shipment.lane, days: receipt.day - shipment.day }] : [];
+};
 
 function isPlain(claim: Claim, { parts, split, doubles }: Delivery): boolean {
   const [only, ...more] = parts;
@@ -39,6 +49,4 @@ export function accept(desk: Desk, claim: Claim, delivery: Delivery): void {
   desk.pair({ shipments: claim.shipments, receipts: delivery.parts, rule: ruleOf(claim, delivery) });
   for (const { receipt, of } of delivery.doubles)
     if (desk.isOpen(receipt) && delivery.parts.includes(of)) desk.double(receipt, of);
-  const [shipment, receipt] = [claim.shipments[0], delivery.parts[0]];
-  if (shipment && receipt) desk.usual.learn(shipment.lane, receipt.day - shipment.day);
 }
