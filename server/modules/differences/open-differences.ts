@@ -1,13 +1,10 @@
 import { v7 as newId } from 'uuid';
 import type { Transaction } from '@/db/client';
 import { differences } from '@/db/schema/differences';
-import { containerTypes } from '@/db/schema/containers';
-import { eq } from 'drizzle-orm';
-import { multiply, roundToMinor } from '@/shared/domain/money';
 import type { Counted, Counting } from '../shipments/count-shipment';
-import { termsInForce } from '../terms/terms-in-force';
 import { isWithinTolerance } from './tolerance';
 import { settleDifference } from './settle-difference';
+import { worthOf } from './worth';
 
 type Declared = { typeCode: string; declared: number };
 type Opening = { counted: Counted; counting: Counting; declared: readonly Declared[] };
@@ -56,17 +53,4 @@ export async function openDifferences(
       });
     }
   }
-}
-
-type Worth = { companyId: string; currency: string; typeCode: string; day: string };
-
-/** Replacement value of so many units by the partner's terms, or by the container type where there are none. */
-export async function worthOf(tx: Transaction, worth: Worth, units: number): Promise<string> {
-  const terms = await termsInForce(tx, worth);
-  const [type] = await tx
-    .select({ replacement: containerTypes.replacement })
-    .from(containerTypes)
-    .where(eq(containerTypes.code, worth.typeCode));
-  const each = terms?.replacement ?? type?.replacement ?? '0';
-  return roundToMinor(multiply(each, String(units)), worth.currency);
 }

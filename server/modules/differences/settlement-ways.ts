@@ -1,24 +1,17 @@
-import { and, desc, eq, inArray, max } from 'drizzle-orm';
+import { eq, max } from 'drizzle-orm';
 import { v7 as newId } from 'uuid';
 import type { Transaction } from '@/db/client';
 import { differences, type SettlementWay } from '@/db/schema/differences';
-import { ledgerEntries, partnerEvents } from '@/db/schema/ledger';
-import { countLines, counts, type shipments } from '@/db/schema/shipments';
+import { countLines, counts } from '@/db/schema/shipments';
 import { Problem } from '@/shared/problems/problems';
 import { outsideAccount, siteAccount, transitAccount } from '../ledger/accounts';
 import type { Entry, Move } from '../ledger/post-entry';
 import type { PartnerEvent } from '../ledger/record-events';
-import type { SiteWithCompany } from '../partners/sites';
-import { type DifferenceRow, refuseMoreThanOpen, type Settling } from './settle-difference';
+import { correctedEvents, countedNow, type CountScene, entryOfCount, sidesOf } from './corrected-count';
+import { type DifferenceRow, refuseMoreThanOpen } from './locked-difference';
+import type { Settling } from './settle-difference';
 
-export type Scene = {
-  difference: DifferenceRow;
-  settling: Settling;
-  shipment: typeof shipments.$inferSelect;
-  count: typeof counts.$inferSelect;
-  from: SiteWithCompany;
-  to: SiteWithCompany;
-};
+export type Scene = CountScene & { difference: DifferenceRow; settling: Settling };
 type Settlement = { entry: Entry; events: PartnerEvent[]; swapped?: DifferenceRow };
 type Way = (tx: Transaction, scene: Scene) => Promise<Settlement>;
 
@@ -72,87 +65,31 @@ async function receiverMiscounted(tx: Transaction, scene: Scene): Promise<Settle
   const site = await siteAccount(tx, to);
   const fewer = difference.openUnits < 0;
   const [a, b] = fewer ? [transit, site] : [site, transit];
-  const countEntry = await entryOfCount(tx, { countId: count.id, shipmentId: shipment.id });
-  const entry = {
-    ...entryOf(scene, [{ typeCode: difference.typeCode, from: a, to: b, units: settling.units }]),
-    valueDate: count.countedOn,
-    correctsEntryId: countEntry,
-  };
-  const right = difference.counted + (fewer ? settling.units : -settling.units);
-  return {
-    entry,
-    events: await correctedEvents(tx, { ...scene, by: fewer ? settling.units : -settling.units, right }),
-  };
-}
-
-/** The entry of the count, or of the shipment's departure where nothing at all was counted. */
-export async function entryOfCount(
-  tx: Transaction,
-  by: { countId: string; shipmentId: string },
-): Promise<number> {
-  const [counted] = await tx
-    .select({ id: ledgerEntries.id })
-    .from(ledgerEntries)
-    .where(and(eq(ledgerEntries.shipmentId, by.shipmentId), eq(ledgerEntries.countId, by.countId)))
-    .limit(1);
-  if (counted) return counted.id;
-  const [sent] = await tx
-    .select({ id: ledgerEntries.id })
-    .from(ledgerEntries)
-    .where(eq(ledgerEntries.shipmentId, by.shipmentId))
-    .orderBy(desc(ledgerEntries.id))
-    .limit(1);
-  if (!sent) throw new Problem('not found');
-  return sent.id;
-}
-
-type Correcting = Pick<Scene, 'count' | 'from' | 'to' | 'shipment'> & {
-  difference: { typeCode: string };
-  by: number;
-  right: number;
-};
-
-/** Corrects the issued and returned events of a count; where there was none (counted 0), writes it on the count's day. */
-export async function correctedEvents(tx: Transaction, scene: Correcting): Promise<PartnerEvent[]> {
-  const { count, shipment, difference, by, right } = scene;
-  const held = await tx
-    .select()
-    .from(partnerEvents)
-    .where(
-      and(
-        eq(partnerEvents.shipmentId, shipment.id),
-        eq(partnerEvents.countId, count.id),
-        eq(partnerEvents.typeCode, difference.typeCode),
-        inArray(partnerEvents.kind, ['issued', 'returned']),
-      ),
-    );
-  const cause = `count of ${shipment.reference} put right to ${right}`;
-  return sidesOf(scene).map(({ companyId, kind }) => {
-    const event = {
-      companyId,
-      date: count.countedOn,
-      typeCode: difference.typeCode,
-      shipmentId: shipment.id,
-      countId: count.id,
-      cause,
-    };
-    const named = held.find((row) => row.companyId === companyId && row.kind === kind);
-    if (named) return { ...event, kind: 'corrected' as const, quantity: by, correctsId: named.id };
-    if (by < 0)
-      throw new Problem('cannot be reckoned', { data: { why: 'a count cannot be put right below zero' } });
-    return { ...event, kind, quantity: by };
+  const by = fewer ? settling.units : -settling.units;
+  const { typeCode } = difference;
+  const counted = await countedNow(tx, {
+    shipmentId: shipment.id,
+    countId: count.id,
+    toSiteId: to.id,
+    typeCode,
   });
-}
-
-/** Which partners a count concerns, and how (RULES 2). */
-export function sidesOf({
-  from,
-  to,
-}: Pick<Scene, 'from' | 'to'>): { companyId: string; kind: 'issued' | 'returned' }[] {
-  return [
-    ...(to.company.kind === 'partner' ? [{ companyId: to.companyId, kind: 'issued' as const }] : []),
-    ...(from.company.kind === 'partner' ? [{ companyId: from.companyId, kind: 'returned' as const }] : []),
-  ];
+  const correctsEntryId = await entryOfCount(tx, { countId: count.id, shipmentId: shipment.id });
+  const events = await correctedEvents(tx, {
+    ...scene,
+    typeCode,
+    by,
+    right: counted + by,
+    ...(settling.disputeId ? { disputeId: settling.disputeId } : {}),
+  });
+  return {
+    entry: {
+      ...entryOf(scene, [{ typeCode, from: a, to: b, units: settling.units }]),
+      valueDate: count.countedOn,
+      countId: count.id,
+      correctsEntryId,
+    },
+    events,
+  };
 }
 
 /** Lost, charged to the party that bears it. The receiver must hold it to lose it; a sender who does not bear it is relieved. */

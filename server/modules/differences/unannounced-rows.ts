@@ -1,0 +1,90 @@
+import { and, asc, eq, exists, inArray, sql } from 'drizzle-orm';
+import type { Reader } from '@/db/client';
+import { containerTypes } from '@/db/schema/containers';
+import { receiptLines, receipts } from '@/db/schema/work';
+import {
+  endsOf,
+  fromCompany,
+  fromSite,
+  laneColumns,
+  onLaneOf,
+  partnerOf,
+  toCompany,
+  toSite,
+} from './lane-ends';
+import { afterKey, holdsText } from './list-key';
+import type { Asked, Found } from './list-differences';
+import { worthOfLines } from './worth-of-lines';
+
+/** Receipts from files that belong to no shipment of the book. */
+export async function unannouncedRows(db: Reader, { query, after, limit }: Asked): Promise<Found[]> {
+  const rows = await db
+    .select({ receipt: receipts, ...laneColumns })
+    .from(receipts)
+    .innerJoin(fromSite, eq(fromSite.id, receipts.fromSiteId))
+    .innerJoin(toSite, eq(toSite.id, receipts.toSiteId))
+    .innerJoin(fromCompany, eq(fromCompany.id, fromSite.companyId))
+    .innerJoin(toCompany, eq(toCompany.id, toSite.companyId))
+    .where(
+      and(
+        eq(receipts.state, 'unannounced'),
+        onLaneOf(query.partner),
+        query.type ? exists(linesOfType(db, query.type)) : undefined,
+        holdsText(receipts.reference, query.search),
+        afterKey({ since: receipts.countedOn, id: receipts.id }, after),
+      ),
+    )
+    .orderBy(asc(receipts.countedOn), asc(receipts.id))
+    .limit(limit);
+  const lines = await countedOf(
+    db,
+    rows.map((row) => row.receipt.id),
+  );
+  const loads = rows.map((row) => ({
+    ...partnerOf(row),
+    day: row.receipt.countedOn,
+    lines: lines.get(row.receipt.id) ?? [],
+  }));
+  const worth = await worthOfLines(db, loads);
+  return rows.map((row, index) => ({
+    id: row.receipt.id,
+    kind: 'unannounced' as const,
+    shipmentId: null,
+    importId: row.receipt.importId,
+    reference: row.receipt.reference,
+    ...endsOf(row),
+    lines: [...(loads[index]?.lines ?? [])],
+    units: (loads[index]?.lines ?? []).reduce((total, line) => total + line.units, 0),
+    since: row.receipt.countedOn,
+    atStake: worth[index] ?? '0',
+    currency: loads[index]?.currency ?? '',
+    state: 'open' as const,
+    ways: [],
+    disputeId: null,
+  }));
+}
+
+function linesOfType(db: Reader, typeCode: string) {
+  return db
+    .select({ one: sql`1` })
+    .from(receiptLines)
+    .where(and(eq(receiptLines.receiptId, receipts.id), eq(receiptLines.typeCode, typeCode)));
+}
+
+async function countedOf(db: Reader, ids: readonly string[]): Promise<Map<string, Found['lines']>> {
+  const lines = new Map<string, Found['lines']>(ids.map((id) => [id, []]));
+  if (ids.length === 0) return lines;
+  const rows = await db
+    .select({
+      receiptId: receiptLines.receiptId,
+      typeCode: receiptLines.typeCode,
+      typeName: containerTypes.name,
+      units: receiptLines.counted,
+    })
+    .from(receiptLines)
+    .innerJoin(containerTypes, eq(containerTypes.code, receiptLines.typeCode))
+    .where(inArray(receiptLines.receiptId, [...ids]))
+    .orderBy(sql`${receiptLines.counted} desc`, receiptLines.typeCode);
+  for (const { receiptId, ...line } of rows) lines.get(receiptId)?.push(line);
+  return lines;
+}
