@@ -29,7 +29,7 @@ export function clientFiles(folder: string): Router {
     if (request.path.startsWith('/api/') || path.extname(request.path) !== '' || !existsSync(page))
       return next();
     response.setHeader('cache-control', 'no-cache');
-    response.sendFile(page);
+    response.sendFile('index.html', { root: path.resolve(folder) });
   });
   return router;
 }
