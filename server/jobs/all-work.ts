@@ -1,9 +1,12 @@
 import type { JobHandler } from './job-queue';
 import type { Scheduled } from './schedule';
+import { importJob } from '../modules/imports/confirm-import';
+import { runImport } from '../modules/imports/run-import';
+import { bookCheck } from '../modules/balances/check-book';
 import { automaticCountJobs, automaticCounts } from '../modules/shipments/auto-count';
 
 /** What each kind of job does. */
-export const jobHandlers: Record<string, JobHandler> = { ...automaticCountJobs };
+export const jobHandlers: Record<string, JobHandler> = { ...automaticCountJobs, [importJob]: runImport };
 
 /** What happens by the clock. */
-export const scheduled: Scheduled[] = [automaticCounts];
+export const scheduled: Scheduled[] = [automaticCounts, bookCheck];

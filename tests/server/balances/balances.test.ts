@@ -1,0 +1,120 @@
+import { aProduct, type Product } from '../../support/app';
+import type { Caller } from '../../support/caller';
+import { aLane, counted, empties, fulls, type Lane, sentEmpties } from '../../support/lane';
+
+let product: Product;
+let lane: Lane;
+beforeEach(async () => {
+  product = await aProduct('balances');
+  lane = await aLane(product);
+});
+afterEach(() => product.close());
+
+const figures = async (caller: Caller, company: { id: string }, query: Record<string, string> = {}) => {
+  const { body } = await caller.get(`/balances/${company.id}/${lane.type.code}`, query);
+  const { atSites, sent, sentDiffers, toIt, toItDiffers, inQuestion, held } = body;
+  return { atSites, sent, sentDiffers, toIt, toItDiffers, inQuestion, held };
+};
+const none = { atSites: 0, sent: 0, sentDiffers: 0, toIt: 0, toItDiffers: 0, inQuestion: 0, held: 0 };
+const load = (units: number) => ({ [lane.type.code]: units });
+
+describe('balances', () => {
+  it('follow a shipment from the plant over the road to the partner', async () => {
+    const id = await sentEmpties(lane, load(400));
+    expect(await figures(lane.coordinator, lane.operator)).toEqual({ ...none, atSites: -400, sent: 400 });
+    expect(await figures(lane.clerk, lane.partner)).toEqual({ ...none, toIt: 400 });
+    await lane.clerk.post(`/shipments/${id}/counts`, counted(load(392)));
+    expect(await figures(lane.clerk, lane.partner)).toEqual({
+      ...none,
+      atSites: 392,
+      held: 392,
+      toItDiffers: 8,
+      inQuestion: 8,
+    });
+    expect(await figures(lane.coordinator, lane.operator)).toEqual({
+      ...none,
+      atSites: -400,
+      sentDiffers: 8,
+      inQuestion: 8,
+      held: -392,
+    });
+  });
+
+  it('leave with the sender what it sent until that is counted, and what differs until that is settled', async () => {
+    const first = await sentEmpties(lane, load(100));
+    await lane.clerk.post(`/shipments/${first}/counts`, counted(load(100)));
+    const { body } = await lane.clerk.post('/shipments', fulls(lane, load(60)));
+    expect(await figures(lane.clerk, lane.partner)).toEqual({ ...none, atSites: 40, sent: 60, held: 100 });
+    await lane.coordinator.post(`/shipments/${body.id}/counts`, counted(load(57)));
+    expect(await figures(lane.clerk, lane.partner)).toEqual({
+      ...none,
+      atSites: 40,
+      sentDiffers: 3,
+      inQuestion: 3,
+      held: 43,
+    });
+  });
+
+  it('of an earlier day are as that day ended', async () => {
+    const leave = async (leftOn: string, units: number): Promise<string> => {
+      const form = { ...empties(lane, load(units)), leftOn };
+      return (await lane.coordinator.post('/shipments', form)).body.id as string;
+    };
+    const id = await leave('2026-03-10', 50);
+    await lane.clerk.post(`/shipments/${id}/counts`, counted(load(44)));
+    await leave('2026-03-20', 7);
+    const asOf = (day: string) => figures(lane.coordinator, lane.partner, { asOf: day });
+    expect(await asOf('2026-03-09')).toEqual(none);
+    expect(await asOf('2026-03-10')).toEqual({ ...none, toIt: 50 });
+    expect(await asOf('2026-03-19')).toEqual({ ...none, toIt: 50 });
+    expect(await asOf('2026-03-20')).toEqual(await figures(lane.coordinator, lane.partner));
+  });
+
+  it('change from the value date on, and on no day before it, when an entry is dated back', async () => {
+    const days = ['2026-03-04', '2026-03-05', '2026-03-06', '2026-03-20'];
+    const all = () => Promise.all(days.map((asOf) => figures(lane.coordinator, lane.operator, { asOf })));
+    const before = await all();
+    const entry = { kind: 'bought', siteId: lane.plant.id, typeCode: lane.type.code, units: 30 };
+    await lane.coordinator.post('/adjustments', { ...entry, on: '2026-03-05', reason: 'Invoice came late' });
+    const after = await all();
+    expect(after.map((now, index) => now.atSites - (before[index]?.atSites ?? 0))).toEqual([0, 30, 30, 30]);
+  });
+
+  it('are listed company by company, and a partner’s own only', async () => {
+    const id = await sentEmpties(lane, load(10));
+    const other = await product.aCompany({ name: 'Pallwick Fasteners' });
+    const stranger = await product.as(await product.aPerson(other, ['manager']));
+    const { body } = await lane.coordinator.get('/balances');
+    expect(body.rows.map((row: { company: string }) => row.company)).toEqual([
+      'Fennmark Heat Pumps',
+      'Kestrel Coil Works',
+    ]);
+    expect((await stranger.get('/balances')).body.rows).toEqual([]);
+    expect((await stranger.get('/balances', { company: lane.partner.id })).body.rows).toEqual([]);
+    const paths = [
+      `/balances/${lane.partner.id}/${lane.type.code}`,
+      `/balances/${lane.partner.id}/${lane.type.code}/movements`,
+      `/shipments/${id}`,
+    ];
+    const answers = await Promise.all(paths.map((path) => stranger.get(path)));
+    expect(answers.map((answer) => answer.status)).toEqual([404, 404, 404]);
+    const first = (await lane.coordinator.get('/balances', { limit: '1' })).body;
+    const second = (await lane.coordinator.get('/balances', { limit: '1', after: first.next })).body;
+    expect([...first.rows, ...second.rows]).toEqual(body.rows);
+  });
+
+  it('open into their movements, each with its shipment', async () => {
+    const id = await sentEmpties(lane, load(10));
+    const path = `/balances/${lane.operator.id}/${lane.type.code}/movements`;
+    const { body } = await lane.coordinator.get(path, { part: 'sent' });
+    expect(body.rows).toEqual([
+      expect.objectContaining({
+        kind: 'sent',
+        units: 10,
+        from: { kind: 'site', name: 'Tarnby Assembly' },
+        shipment: expect.objectContaining({ id }),
+        by: 'Ane Ravn',
+      }),
+    ]);
+  });
+});
