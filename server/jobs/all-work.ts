@@ -1,5 +1,6 @@
 import type { JobHandler } from './job-queue';
 import type { Scheduled } from './schedule';
+import { housekeeping } from './housekeeping';
 import { importJob } from '../modules/imports/confirm-import';
 import { runImport } from '../modules/imports/run-import';
 import { bookCheck } from '../modules/balances/check-book';
@@ -9,4 +10,4 @@ import { automaticCountJobs, automaticCounts } from '../modules/shipments/auto-c
 export const jobHandlers: Record<string, JobHandler> = { ...automaticCountJobs, [importJob]: runImport };
 
 /** What happens by the clock. */
-export const scheduled: Scheduled[] = [automaticCounts, bookCheck];
+export const scheduled: Scheduled[] = [...housekeeping, automaticCounts, bookCheck];

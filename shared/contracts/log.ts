@@ -54,3 +54,13 @@ export const listLetters = operation({
   query: listQuery.extend({ state: z.enum(['waiting', 'sent', 'captured', 'failed']).optional() }),
   answer: pageOf(letterRow),
 });
+
+export const verifyLedgerSeals = operation({
+  name: 'verifyLedgerSeals',
+  resource: 'log',
+  method: 'GET',
+  path: '/ledger-verification',
+  summary:
+    'Reckons the chain of seals over the unit ledger anew; names the first entry that was changed behind its back',
+  answer: z.object({ sealedEntries: z.int(), firstBroken: z.int().nullable() }),
+});
