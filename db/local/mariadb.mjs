@@ -10,7 +10,7 @@ import { databaseUser } from './system-user.mjs';
 import { clearAbandonedTestFolders, makeTestFolder, removeTestFolder } from './test-folder.mjs';
 
 /**
- * @typedef {{ ownerUrl: string, appUrl: string, socket: string, host: string, port: number,
+ * @typedef {{ ownerUrl: string, appUrl: string, socket: string, host: string, port: number, pid: number,
  *   accounts: import('./accounts.mjs').Accounts, isUp: () => boolean, markFilled: () => void,
  *   stop: () => Promise<void> }} LocalDatabase
  */
@@ -37,6 +37,7 @@ export async function startLocalDatabase({ folder: wished, forTests = false, say
     socket: folder.socket,
     host: '127.0.0.1',
     port: running.port,
+    pid: running.pid,
     accounts,
     isUp: () => isRunningWith(running.pid, folder.data),
     markFilled: () => rmSync(folder.unfilled, { force: true }),
