@@ -8,10 +8,16 @@ const here = (file) => ({ type: 'sourceFile', filePath: path.join(__dirname, fil
 const nothing = { type: 'empty' };
 
 // What the first load leaves out, by who asks and for what: navigators and link previews of the router (the app has
-// one Slot, and links of its own), animated lists and old touchables of the components (the app has none), and all of
-// zod's languages but one. Whoever needs one of them takes its line out and looks at the size of the first load.
+// one Slot, and links of its own), animated lists and old touchables of the components (the app has none), zod's
+// JSON Schema (the server's) and all of its languages but one. Whoever needs one of them takes its line out and looks
+// at the size of the first load.
 const leftOut = [
   [/^zod\//, /(^|\/)locales(\/index\.c?js)?$/, here('components/data/zod-locales.ts')],
+  [
+    /^zod\//,
+    /\/(compile|from-json-schema|to-json-schema|json-schema-generator|json-schema-processors)\.js$/,
+    nothing,
+  ],
   [/^expo-router\/build\//, /\/layouts\/StackClient$/, here('components/shell/slot-router.ts')],
   [/^expo-router\/build\//, /^\.\/(stack|color|layouts\/(Tabs|experimental-stack))$/, nothing],
   [/^expo-router\/build\//, /(^|\/)(react-navigation\/(bottom-tabs|elements)|native-tabs(\/\w+)?)$/, nothing],

@@ -40,7 +40,7 @@ async function sendTrusted<O extends Operation>(operation: O, call: Call<O>): Pr
       forgetCsrfToken();
       return send(operation, call);
     }
-    if (error.code === 'not signed in' && operation.resource !== 'session') {
+    if (error.code === 'not signed in' && operation.path !== '/session') {
       await whenSignedInAgain(error);
       return send(operation, call);
     }

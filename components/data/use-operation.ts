@@ -8,6 +8,7 @@ import {
 import { useRef } from 'react';
 import type { AnswerOf, Operation, ParamsOf, QueryInputOf } from '@/shared/contracts/operation';
 import { callApi, type Call } from './call-api';
+import { newId } from './new-id';
 import { isRefused } from './problem-error';
 
 type ReadArguments<O extends Operation> = { params?: ParamsOf<O>; query?: QueryInputOf<O> };
@@ -68,7 +69,7 @@ export function usePost<O extends Operation>(
   const key = useRef<string | undefined>(undefined);
   return useMutation<AnswerOf<O>, Error, Call<O>>({
     mutationFn: (call) => {
-      key.current ??= call.key ?? crypto.randomUUID();
+      key.current ??= call.key ?? newId();
       return callApi(operation, { ...call, key: key.current });
     },
     onSuccess: async () => {

@@ -1,6 +1,7 @@
 import { changePassword, signOut } from '@/shared/contracts/session';
 import { text } from '@/shared/text/catalogue';
 import { callApi } from '../data/call-api';
+import { ProblemError } from '../data/problem-error';
 import { useSignedIn } from '../data/use-session';
 import { dropAllDrafts } from '../forms/draft';
 import { FormFrame } from '../forms/FormFrame';
@@ -16,7 +17,10 @@ import { Page } from '../ui/Page';
 import { Text } from '../ui/Text';
 
 async function leave() {
-  await callApi(signOut);
+  // Whoever is signed out already only has to leave.
+  await callApi(signOut).catch((error: unknown) => {
+    if (!(error instanceof ProblemError) || error.code !== 'not signed in') throw error;
+  });
   dropAllDrafts();
   // A fresh page, so that nothing read before stays in memory.
   window.location.assign('/sign-in');

@@ -1,5 +1,5 @@
-import { Redirect, usePathname } from 'expo-router';
-import type { ReactNode } from 'react';
+import { Redirect } from 'expo-router';
+import { useState, type ReactNode } from 'react';
 import { text } from '@/shared/text/catalogue';
 import { Problem } from '../data/Problem';
 import { useSession } from '../data/use-session';
@@ -12,11 +12,12 @@ import { SignInDialog } from './SignInDialog';
 /** Lets signed-in people in; sends others to sign in and back to where they wanted to go. */
 export function KeepGate({ children }: { children: ReactNode }) {
   const { isPending, error, retry, signedIn } = useSession();
-  const path = usePathname();
+  // Taken at once: as long as no screen is shown, the router forgets which one was asked for.
+  const [wanted] = useState(() => window.location.pathname + window.location.search);
   if (signedIn === null) {
     if (isPending) return <Waiting />;
     if (error) return <Unreached error={error} onRetry={() => void retry()} />;
-    return <Redirect href={path === '/' ? '/sign-in' : `/sign-in?to=${encodeURIComponent(path)}`} />;
+    return <Redirect href={wanted === '/' ? '/sign-in' : `/sign-in?to=${encodeURIComponent(wanted)}`} />;
   }
   return (
     <>

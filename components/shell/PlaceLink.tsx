@@ -37,7 +37,7 @@ export function BarLink({ place, current, waiting }: Props) {
     <View style={styles.bar}>
       <View style={[styles.marker, current && styles.markerCurrent]} />
       <RowLink href={place.href} name={nameOf(place.label, waiting)} current={current}>
-        <Box row gap="xs" align="center">
+        <Box row gap="xs" spread="center">
           <Text variant="small" oneLine {...(current ? { tone: 'action' as const, strong: true } : {})}>
             {place.label}
           </Text>

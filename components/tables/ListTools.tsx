@@ -33,9 +33,15 @@ export function ListTools<Row>({ state, filters, searchLabel, columns, downloads
         <FilterInput key={filter.key} filter={filter} state={state} />
       ))}
       {!wide && sortable.length > 0 ? <SortSelect state={state} columns={sortable} /> : null}
-      {state.isFiltered ? <Button kind="quiet" label={text.ui.clearFilters} onPress={state.clear} /> : null}
+      {state.isFiltered ? (
+        <Box>
+          <Button kind="quiet" label={text.ui.clearFilters} onPress={state.clear} />
+        </Box>
+      ) : null}
       {downloads.map((download) => (
-        <DownloadLink key={download.href} href={download.href} label={download.label} kind="quiet" />
+        <Box key={download.href}>
+          <DownloadLink href={download.href} label={download.label} kind="quiet" />
+        </Box>
       ))}
     </Box>
   );

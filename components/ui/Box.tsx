@@ -9,7 +9,7 @@ type Props = {
   row?: boolean;
   wrap?: boolean;
   align?: 'start' | 'center' | 'end' | 'stretch' | 'baseline';
-  spread?: 'start' | 'between' | 'end';
+  spread?: 'start' | 'between' | 'center' | 'end';
   grow?: boolean;
   pad?: Space;
   /** Least width in px before things wrap. */
@@ -23,7 +23,12 @@ const aligned = {
   stretch: 'stretch',
   baseline: 'baseline',
 } as const;
-const spreadOut = { start: 'flex-start', between: 'space-between', end: 'flex-end' } as const;
+const spreadOut = {
+  start: 'flex-start',
+  center: 'center',
+  between: 'space-between',
+  end: 'flex-end',
+} as const;
 
 /** Lays things out below or beside each other, with gaps from the scale. */
 export function Box({ children, gap = 'm', row, wrap, align, spread, grow, pad, least }: Props) {

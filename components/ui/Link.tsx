@@ -109,7 +109,15 @@ export function DownloadLink({ href, label, kind = 'secondary', full }: ButtonLi
 }
 
 const styles = StyleSheet.create({
-  words: { fontFamily, lineHeight: 24 },
+  // The pressed area is larger than the words, without moving what stands around them.
+  words: {
+    fontFamily,
+    lineHeight: 24,
+    paddingVertical: 10,
+    marginVertical: -10,
+    paddingHorizontal: 8,
+    marginHorizontal: -8,
+  },
   strong: { fontWeight: weight.strong },
   row: { minHeight: target, paddingVertical: space.s, justifyContent: 'center' },
 });
