@@ -25,6 +25,25 @@ function tooMany(data: Data): string {
     : `Too many tries. Try again in ${minutes} ${plural(minutes, { one: 'minute', other: 'minutes' })}.`;
 }
 
+/** Why a sheet that is what its name says could not be read. */
+function unreadable(data: Data): string {
+  const columns = word(data, 'columns', 'the columns');
+  const most = formatUnits(whole(data, 'most') ?? 0);
+  const sentences: Record<string, string> = {
+    'columns missing': `The first line does not name ${columns}. Nothing was stored; start from the template.`,
+    'column twice': `The first line names ${columns} twice. Nothing was stored; leave one of them out.`,
+    'no rows': 'There are no rows below the heads. Nothing was stored.',
+    'too many rows': `The file has more than ${most} rows. Nothing was stored; send it in parts.`,
+    'unpacks too large': 'The file unpacks to far more than a sheet holds, so it was not opened.',
+    macros: 'The file holds macros or other files, so it was not opened. Save it as a plain XLSX or CSV.',
+    'outside parts': 'The file points to things outside itself, so it was not opened. Save it as CSV.',
+  };
+  return (
+    sentences[word(data, 'why', '')] ??
+    'The file cannot be read. Open it in your own program to check it, save it again and send that.'
+  );
+}
+
 /** What happened, what is safe, what to do: a sentence for every problem, with the server's data filled in. */
 export const problems: Record<ClientProblemCode, (data: Data) => string> = {
   'not valid': () => 'Some of this cannot be right. Nothing was stored; see the marked fields.',
@@ -58,9 +77,11 @@ export const problems: Record<ClientProblemCode, (data: Data) => string> = {
   'cannot be reckoned': (data) =>
     word(data, 'why', 'This cannot be reckoned from what is recorded. Nothing was stored.'),
   'too large': () => 'The file is too large. Nothing was stored; send a smaller one, up to 10 MB.',
-  'file not as named': () => 'The file is not what its name says. Send a photo (JPEG, PNG, WebP) or a PDF.',
-  'file not readable': () =>
-    'The file cannot be read. Open it in your own program to check it, save it again and send that.',
+  'file not as named': (data) =>
+    data.wanted === 'sheet'
+      ? 'The file is not what its name says. Nothing was stored; send the template filled in, as CSV or XLSX.'
+      : 'The file is not what its name says. Send a photo (JPEG, PNG, WebP) or a PDF.',
+  'file not readable': unreadable,
   'content not understood': () => 'The server does not know this kind of content. Nothing was stored.',
   'key used otherwise': () =>
     'This was sent before with other content. What was stored first stands; reload to see it.',
