@@ -55,6 +55,16 @@ export const listLetters = operation({
   answer: pageOf(letterRow),
 });
 
+export const readLetter = operation({
+  name: 'readLetter',
+  resource: 'letters',
+  method: 'GET',
+  path: '/letters/:letter',
+  summary: 'One message of the outbox',
+  params: z.object({ letter: id }),
+  answer: letterRow,
+});
+
 export const verifyLedgerSeals = operation({
   name: 'verifyLedgerSeals',
   resource: 'log',

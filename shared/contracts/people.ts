@@ -29,6 +29,16 @@ export const listPeople = operation({
   answer: pageOf(personRow),
 });
 
+export const readPersonRow = operation({
+  name: 'readPersonRow',
+  resource: 'people',
+  method: 'GET',
+  path: '/people/:person',
+  summary: 'One person with roles',
+  params: z.object({ person: id }),
+  answer: personRow,
+});
+
 const someRoles = z.array(z.enum(roles)).min(1, 'Choose at least one role');
 
 export const invitePerson = operation({

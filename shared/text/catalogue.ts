@@ -1,6 +1,9 @@
 import { fields } from './en/fields';
 import { imports } from './en/imports';
 import { gallery } from './en/gallery';
+import { letters, log } from './en/log';
+import { partners } from './en/partners';
+import { people } from './en/people';
 import { problems } from './en/problems';
 import { session } from './en/session';
 import { shell } from './en/shell';
@@ -12,6 +15,10 @@ export const text = {
   fields,
   imports,
   gallery,
+  letters,
+  log,
+  partners,
+  people,
   problems,
   session,
   shell,

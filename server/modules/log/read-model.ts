@@ -5,6 +5,7 @@ import { companies, people } from '@/db/schema/companies';
 import { outbox } from '@/db/schema/work';
 import type { listLetters, listLog } from '@/shared/contracts/log';
 import type { QueryOf } from '@/shared/contracts/operation';
+import { Problem } from '@/shared/problems/problems';
 import { cursor, cutPage } from '../../http/page';
 import { likeText } from '../../http/search';
 
@@ -51,4 +52,10 @@ export async function lettersPage(db: Database, query: QueryOf<typeof listLetter
     .orderBy(desc(outbox.id))
     .limit(query.limit + 1);
   return cutPage(rows, query.limit, (row) => [row.id]);
+}
+
+export async function letterOf(db: Database, id: string) {
+  const [letter] = await db.select().from(outbox).where(eq(outbox.id, id));
+  if (!letter) throw new Problem('not found');
+  return letter;
 }

@@ -32,16 +32,14 @@ export async function invite(
   refuseRoles(body.roles, company.kind);
   const id = newId();
   try {
-    await tx
-      .insert(people)
-      .values({
-        id,
-        companyId,
-        name: body.name,
-        email: body.email,
-        sessionsFrom: scene.now,
-        createdAt: scene.now,
-      });
+    await tx.insert(people).values({
+      id,
+      companyId,
+      name: body.name,
+      email: body.email,
+      sessionsFrom: scene.now,
+      createdAt: scene.now,
+    });
   } catch (error) {
     if (databaseErrorNumber(error) !== 1062) throw error;
     throw new Problem('already exists', {

@@ -3,6 +3,7 @@ import type { Database } from '@/db/client';
 import { companies, people, personRoles } from '@/db/schema/companies';
 import type { listPeople, PersonRow } from '@/shared/contracts/people';
 import type { QueryOf } from '@/shared/contracts/operation';
+import { Problem } from '@/shared/problems/problems';
 import { cursor, cutPage } from '../../http/page';
 import { type Person, scopeOf } from '../../http/person';
 import { likeText } from '../../http/search';
@@ -35,11 +36,33 @@ export async function peoplePage(db: Database, person: Person, query: QueryOf<ty
     )
     .orderBy(asc(people.name), asc(people.id))
     .limit(query.limit + 1);
+  return cutPage(await asRows(db, found), query.limit, (row) => [row.name, row.id]);
+}
+
+/** One person; of another company: nobody. */
+export async function personRowOf(
+  db: Database,
+  { person, id }: { person: Person; id: string },
+): Promise<PersonRow> {
+  const scope = scopeOf(person);
+  const found = await db
+    .select({ person: people, company: { id: companies.id, name: companies.name, kind: companies.kind } })
+    .from(people)
+    .innerJoin(companies, eq(companies.id, people.companyId))
+    .where(and(eq(people.id, id), scope ? eq(people.companyId, scope) : undefined));
+  const [row] = await asRows(db, found);
+  if (!row) throw new Problem('not found');
+  return row;
+}
+
+type Found = { person: typeof people.$inferSelect; company: PersonRow['company'] };
+
+async function asRows(db: Database, found: readonly Found[]): Promise<PersonRow[]> {
   const roles = await rolesOf(
     db,
     found.map((row) => row.person.id),
   );
-  const rows = found.map((row): PersonRow => ({
+  return found.map((row) => ({
     id: row.person.id,
     name: row.person.name,
     email: row.person.email,
@@ -48,7 +71,6 @@ export async function peoplePage(db: Database, person: Person, query: QueryOf<ty
     state: !row.person.active ? 'disabled' : row.person.passwordHash === null ? 'invited' : 'active',
     lastSignedInAt: row.person.lastSignedInAt,
   }));
-  return cutPage(rows, query.limit, (row) => [row.name, row.id]);
 }
 
 async function rolesOf(db: Database, ids: string[]): Promise<Map<string, PersonRow['roles']>> {

@@ -1,7 +1,7 @@
 import * as contracts from '@/shared/contracts/people';
 import { post, type PostCall, read, type Route } from '../../http/route';
 import { change, invite, sendAgain } from './keep-people';
-import { peoplePage } from './read-model';
+import { peoplePage, personRowOf } from './read-model';
 
 const sceneOf = ({ person, deps, at }: Pick<PostCall<never>, 'person' | 'deps' | 'at'>) => ({
   keeper: person,
@@ -11,6 +11,9 @@ const sceneOf = ({ person, deps, at }: Pick<PostCall<never>, 'person' | 'deps' |
 
 export const peopleRoutes: Route[] = [
   read(contracts.listPeople, 'see people', ({ db, person, query }) => peoplePage(db, person, query)),
+  read(contracts.readPersonRow, 'see people', ({ db, person, params }) =>
+    personRowOf(db, { person, id: params.person }),
+  ),
   post(contracts.invitePerson, 'invite people', async (call) => ({
     id: await invite(call.tx, call.body, sceneOf(call)),
   })),

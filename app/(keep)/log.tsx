@@ -1,0 +1,5 @@
+import { LogScreen } from '@/components/log/LogScreen';
+
+export default function LogRoute() {
+  return <LogScreen />;
+}

@@ -1,0 +1,5 @@
+import { MailScreen } from '@/components/mail/MailScreen';
+
+export default function MailRoute() {
+  return <MailScreen />;
+}

@@ -1,0 +1,5 @@
+import { PartnersScreen } from '@/components/partners/PartnersScreen';
+
+export default function PartnersRoute() {
+  return <PartnersScreen />;
+}

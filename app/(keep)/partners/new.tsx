@@ -1,0 +1,5 @@
+import { NewPartnerScreen } from '@/components/partners/NewPartnerScreen';
+
+export default function NewPartnerRoute() {
+  return <NewPartnerScreen />;
+}

@@ -1,0 +1,5 @@
+import { InviteScreen } from '@/components/people/InviteScreen';
+
+export default function InviteRoute() {
+  return <InviteScreen />;
+}

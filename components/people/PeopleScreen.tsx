@@ -1,0 +1,77 @@
+import { listPeople, type PersonRow } from '@/shared/contracts/people';
+import { text } from '@/shared/text/catalogue';
+import { formatInstant } from '@/shared/text/format';
+import { useReadPages } from '../data/use-operation';
+import { useSignedIn } from '../data/use-session';
+import type { Column } from '../tables/column';
+import { RecordList } from '../tables/RecordList';
+import { useListState } from '../tables/use-list-state';
+import { CellText } from '../ui/CellText';
+import { ButtonLink } from '../ui/Link';
+import { Page } from '../ui/Page';
+import { Tag } from '../ui/Tag';
+
+const words = text.people;
+const tones = { active: 'done', invited: 'moving', disabled: 'open' } as const;
+
+const columnsFor = (zone: string): readonly Column<PersonRow>[] => [
+  {
+    key: 'name',
+    head: words.columns.name,
+    cell: (row) => <CellText strong>{row.name}</CellText>,
+    cardRole: 'title',
+  },
+  { key: 'email', head: words.columns.email, cell: (row) => <CellText>{row.email}</CellText> },
+  { key: 'company', head: words.columns.company, cell: (row) => <CellText>{row.company.name}</CellText> },
+  {
+    key: 'roles',
+    head: words.columns.roles,
+    cell: (row) => <CellText>{row.roles.map((role) => words.roles[role].label).join(', ')}</CellText>,
+  },
+  {
+    key: 'last',
+    head: words.columns.last,
+    cell: (row) => (
+      <CellText>{row.lastSignedInAt ? formatInstant(row.lastSignedInAt, zone) : words.never}</CellText>
+    ),
+  },
+  {
+    key: 'state',
+    head: words.columns.state,
+    cardRole: 'tag',
+    cell: (row) => <Tag tone={tones[row.state]} label={words.states[row.state]} />,
+  },
+];
+
+const filters = [
+  {
+    key: 'state',
+    label: words.stateFilter,
+    options: [
+      { value: '', label: words.anyState },
+      ...Object.entries(words.states).map(([value, label]) => ({ value, label })),
+    ],
+  },
+];
+
+export function PeopleScreen() {
+  const state = useListState({ filters: ['state', 'company'] });
+  const list = useReadPages(listPeople, { query: state.query });
+  const { company, may } = useSignedIn();
+  const invite = may('invite people') ? <ButtonLink href="/people/invite" label={words.invite} /> : undefined;
+  return (
+    <Page title={words.title} action={invite}>
+      <RecordList<PersonRow>
+        label={words.title}
+        list={list}
+        columns={columnsFor(company.timeZone)}
+        rowKey={(row) => row.id}
+        {...(may('invite people') ? { rowHref: (row: PersonRow) => `/people/${row.id}` } : {})}
+        state={state}
+        filters={filters}
+        searchLabel={words.search}
+        empty={{ ...words.empty, action: invite }}
+      />
+    </Page>
+  );
+}

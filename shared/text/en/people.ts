@@ -1,0 +1,48 @@
+import { plural } from '../plural';
+
+export const people = {
+  title: 'People',
+  invite: 'Invite someone',
+  invited: (name: string) => `Sent. ${name} finds the invitation by mail.`,
+  again: 'Send the invitation again',
+  sentAgain: 'Sent again. The earlier link no longer works.',
+  saved: 'Saved. It holds at once.',
+  empty: {
+    title: 'Nobody has a sign-in yet',
+    hint: 'Invite the first person: name, mail, and what they do.',
+  },
+  search: 'Name or mail',
+  columns: {
+    name: 'Name',
+    email: 'Mail',
+    company: 'Company',
+    roles: 'Does',
+    state: 'State',
+    last: 'Last signed in',
+  },
+  states: { active: 'active', invited: 'invited, not in yet', disabled: 'taken out' },
+  never: 'never',
+  stateFilter: 'State',
+  anyState: 'Any state',
+  fields: {
+    name: 'Name',
+    email: 'Mail',
+    company: 'Company',
+    ownCompany: 'Choose a company',
+    roles: 'What they do',
+    active: 'May sign in',
+    activeHint: 'Taken out, they are signed out everywhere at once.',
+  },
+  roles: {
+    coordinator: { label: 'Coordinator', hint: 'Sends, counts, settles differences, answers disputes' },
+    engineer: { label: 'Engineer', hint: 'Container types, parts and loops, pool sizes' },
+    finance: { label: 'Finance', hint: 'Terms, months, statements' },
+    administrator: { label: 'Administrator', hint: 'Partners, people, log' },
+    auditor: { label: 'Auditor', hint: 'Reads everything, changes nothing' },
+    clerk: { label: 'Clerk', hint: 'Counts deliveries, announces fulls, disputes counts' },
+    manager: { label: 'Manager', hint: 'Statements, disputes, colleagues’ sign-ins' },
+  },
+  save: 'Save',
+  send: 'Send the invitation',
+  rolesHeld: (count: number) => plural(count, { one: '1 role', other: `${count} roles` }),
+};
