@@ -1,11 +1,11 @@
 import '@/components/theme/fonts.css';
 import '@/components/theme/colours.css';
 import '@/components/theme/base.css';
-import '@/components/ui/ui.css';
-import { QueryClientProvider } from '@tanstack/react-query';
+import '@/components/ui/fields.css';
+import '@/components/ui/sheet.css';
+import '@/components/ui/frame.css';
 import { Slot } from 'expo-router';
-import { useState } from 'react';
-import { makeQueryClient } from '@/components/data/query-client';
+import { QueryProvider } from '@/components/data/QueryProvider';
 import { BrokenPage } from '@/components/shell/BrokenPage';
 
 export function ErrorBoundary() {
@@ -13,10 +13,9 @@ export function ErrorBoundary() {
 }
 
 export default function RootLayout() {
-  const [client] = useState(makeQueryClient);
   return (
-    <QueryClientProvider client={client}>
+    <QueryProvider>
       <Slot />
-    </QueryClientProvider>
+    </QueryProvider>
   );
 }

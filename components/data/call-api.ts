@@ -22,8 +22,7 @@ export async function callApi<O extends Operation>(operation: O, call: Call<O> =
   const answer = await sendTrusted(operation, call);
   const parsed = operation.answer.safeParse(await readJson(answer));
   if (!parsed.success) {
-    console.error(`The answer of ${operation.name} is not as its contract says`, parsed.error.issues);
-    throw new ProblemError('answer not understood', { status: answer.status });
+    throw new ProblemError('answer not understood', { status: answer.status, cause: parsed.error });
   }
   const token = (parsed.data as { csrfToken?: unknown } | undefined)?.csrfToken;
   if (typeof token === 'string') keepCsrfToken(token);

@@ -1,7 +1,13 @@
 import type { BadField } from '@/shared/problems/problems';
 import type { ClientProblemCode } from '@/shared/text/en/problems';
 
-type Detail = { status?: number; data?: Record<string, unknown>; fields?: BadField[]; requestId?: string };
+type Detail = {
+  status?: number;
+  data?: Record<string, unknown>;
+  fields?: BadField[];
+  requestId?: string;
+  cause?: unknown;
+};
 
 /** What went wrong with a request, by its code; `problem-message.ts` puts it into words. */
 export class ProblemError extends Error {
@@ -12,7 +18,7 @@ export class ProblemError extends Error {
   readonly requestId: string | undefined;
 
   constructor(code: ClientProblemCode, detail: Detail = {}) {
-    super(code);
+    super(code, { cause: detail.cause });
     this.name = 'ProblemError';
     this.code = code;
     this.status = detail.status ?? 0;

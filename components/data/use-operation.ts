@@ -32,12 +32,18 @@ export function useRead<O extends Operation>(
   });
 }
 
+/** What stands in the address goes to the server as it is, which checks it. */
+type ListArguments<O extends Operation> = {
+  params?: ParamsOf<O>;
+  query?: QueryInputOf<O> | Record<string, string>;
+};
+
 type PageAnswer = { rows: unknown[]; next: string | null };
 
 /** Reads a list page by page; `fetchNextPage` asks for the page after the last key. */
 export function useReadPages<O extends Operation>(
   operation: O,
-  args: ReadArguments<O> & { enabled?: boolean } = {},
+  args: ListArguments<O> & { enabled?: boolean } = {},
 ) {
   const { enabled, ...asked } = args;
   return useInfiniteQuery({

@@ -88,11 +88,9 @@ export function FormFrame<Schema extends z.ZodType>({
   draft,
   label,
   onSubmit,
-  submitLabel,
   children,
-  ...look
+  ...actions
 }: Props<Schema>) {
-  const { more, inBar, note, disabled } = look;
   const { busy, problem, attempt, send } = useSending({ draft, onSubmit });
   const labels = useRef(new Map<string, string>());
   const place = useMemo(
@@ -104,48 +102,49 @@ export function FormFrame<Schema extends z.ZodType>({
     }),
     [draft.name],
   );
-  const wide = useIsWide();
   useWarnBeforeLeaving(draft.form.formState.isDirty && !busy);
   const errors = listErrors(draft.form.formState.errors);
-  const button = (
-    <Button
-      label={submitLabel}
-      busy={busy}
-      {...(disabled ? { disabled } : {})}
-      full={!wide}
-      onPress={() => void send()}
-    />
-  );
+  const labelOf = (path: string) => labels.current.get(path);
   return (
     <FormPlaceContext.Provider value={place}>
       <FormProvider {...draft.form}>
         <FormElement name={label} onSubmit={() => void send()}>
-          <ErrorSummary
-            form={draft.name}
-            errors={errors}
-            attempt={attempt}
-            labelOf={(path) => labels.current.get(path)}
-          />
+          <ErrorSummary form={draft.name} errors={errors} attempt={attempt} labelOf={labelOf} />
           {problem === undefined ? null : <Problem error={problem} />}
           {draft.restored ? <Restored draft={draft} /> : null}
           {children}
-          {inBar && !wide ? (
-            <ActionBar note={note}>
-              {button}
-              {more}
-            </ActionBar>
-          ) : (
-            <Box gap="s">
-              {note}
-              <Box row wrap gap="m">
-                {button}
-                {more}
-              </Box>
-            </Box>
-          )}
+          <Actions {...actions} busy={busy} onSend={() => void send()} />
         </FormElement>
       </FormProvider>
     </FormPlaceContext.Provider>
+  );
+}
+
+type ActionsProps = Pick<Props<z.ZodType>, 'submitLabel' | 'more' | 'inBar' | 'note' | 'disabled'> & {
+  busy: boolean;
+  onSend: () => void;
+};
+
+/** The one main button, and what stands beside it; on a phone below each other, in the bar if asked. */
+function Actions({ submitLabel, more, inBar, note, disabled = false, busy, onSend }: ActionsProps) {
+  const wide = useIsWide();
+  const button = <Button label={submitLabel} busy={busy} disabled={disabled} full={!wide} onPress={onSend} />;
+  if (inBar && !wide) {
+    return (
+      <ActionBar note={note}>
+        {button}
+        {more}
+      </ActionBar>
+    );
+  }
+  return (
+    <Box gap="s">
+      {note}
+      <Box row={wide} wrap={wide} align={wide ? 'center' : 'stretch'} gap="m">
+        {button}
+        {more}
+      </Box>
+    </Box>
   );
 }
 

@@ -1,4 +1,5 @@
-import { MoneyInput, NumberInput, type TypedNumber } from '../ui/NumberInput';
+import { MoneyInput } from '../ui/MoneyInput';
+import { NumberInput, type TypedNumber } from '../ui/NumberInput';
 import { TextArea, TextInput } from '../ui/TextInput';
 import { useField } from './use-field';
 

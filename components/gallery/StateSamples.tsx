@@ -90,7 +90,7 @@ export function StateSamples() {
           Counted. The sender has been told.
         </Notice>
         <Notice kind="caution" title="Stacking" live={false}>
-          Check the maker's plate and local rules.
+          {'Check the maker’s plate and local rules.'}
         </Notice>
         <Problem
           error={new ProblemError('database away', { requestId: 'rq-20418' })}

@@ -41,7 +41,7 @@ export function Dialog({ open, title, children, onClose, canClose = true }: Prop
       }}
     >
       <Box gap="l">
-        <Box row spread="between" align="start">
+        <Box row spread="between">
           <Text variant="title" id={head}>
             {title}
           </Text>

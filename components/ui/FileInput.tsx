@@ -17,45 +17,53 @@ type Props = FieldProps & {
   accept?: readonly string[];
 };
 
+type Picked = {
+  files: readonly File[];
+  before: readonly File[];
+  most: number;
+  accept: readonly string[] | undefined;
+};
+
+/** What can be taken of the picked files, and the reason for what cannot. */
+function sortPicked({ files, before, most, accept }: Picked): { all: File[]; reason: string | undefined } {
+  const fits = (file: File) => file.size <= largest;
+  const known = (file: File) => accept !== undefined || file.type === '' || evidence.includes(file.type);
+  const tooLarge = files.find((file) => !fits(file));
+  const unknown = files.find((file) => !known(file));
+  const all = [...before, ...files.filter((file) => fits(file) && known(file))];
+  const reason = tooLarge
+    ? text.ui.fileTooLarge(tooLarge.name, formatBytes(largest))
+    : unknown
+      ? text.ui.fileNotTaken(unknown.name)
+      : all.length > most
+        ? text.ui.filesMost(most)
+        : undefined;
+  return { all: all.slice(0, most), reason };
+}
+
 /** Photos and papers to send along: a dashed tile, then each file with its picture, name and size. */
 export function FileInput({ value, onChange, kind = 'photo', most = 5, accept, ...field }: Props) {
   const [refused, setRefused] = useState<string>();
-  const taken = accept ?? evidence;
+  const words = kind === 'photo' ? text.ui.addPhoto : kind === 'paper' ? text.ui.addPaper : text.ui.addFile;
   const add = (picked: File[]) => {
-    const tooLarge = picked.find((file) => file.size > largest);
-    const notTaken = picked.find((file) => !accept && file.type !== '' && !taken.includes(file.type));
-    const fine = picked.filter(
-      (file) => file.size <= largest && (accept || file.type === '' || taken.includes(file.type)),
-    );
-    const all = [...value, ...fine];
-    setRefused(
-      tooLarge
-        ? text.ui.fileTooLarge(tooLarge.name, formatBytes(largest))
-        : notTaken
-          ? text.ui.fileNotTaken(notTaken.name)
-          : all.length > most
-            ? text.ui.filesMost(most)
-            : undefined,
-    );
-    onChange(all.slice(0, most));
+    const { all, reason } = sortPicked({ files: picked, before: value, most, accept });
+    setRefused(reason);
+    onChange(all);
   };
+  const remove = (file: File) => onChange(value.filter((each) => each !== file));
   return (
     <FieldGroup {...field} error={field.error ?? refused}>
       <div className="tk-files">
         {value.map((file, at) => (
-          <PickedFile
-            key={`${file.name}-${at}`}
-            file={file}
-            onRemove={() => onChange(value.filter((each) => each !== file))}
-          />
+          <PickedFile key={`${file.name}-${at}`} file={file} onRemove={() => remove(file)} />
         ))}
         {value.length < most ? (
           <label className="tk-file-add">
-            {kind === 'photo' ? text.ui.addPhoto : text.ui.addPaper}
+            {words}
             <input
               type="file"
-              aria-label={`${kind === 'photo' ? text.ui.addPhoto : text.ui.addPaper}: ${field.label}`}
-              accept={taken.join(',')}
+              aria-label={`${words}: ${field.label}`}
+              accept={(accept ?? evidence).join(',')}
               multiple={most > 1}
               onChange={(event) => {
                 add([...(event.target.files ?? [])]);

@@ -44,20 +44,11 @@ export function LineChart(props: LineChartProps) {
   );
 }
 
-function Plot({
-  label,
-  summary,
-  series,
-  markers = [],
-  yMost = 1,
-  formatX = String,
-  formatY = formatNumber,
-}: LineChartProps) {
+function Plot({ label, summary, series, markers = [], yMost = 1, ...formats }: LineChartProps) {
   const [width, setWidth] = useState(640);
   const all = series.flatMap((each) => each.points);
   if (all.length === 0) return null;
-  const { x, y, xTicks, yTicks, pathOf, margin } = chartScale(all, { width, height }, yMost);
-  const small = { fontFamily, fontSize: typeSize.small, fill: meaning.textSoft };
+  const scale = chartScale(all, { width, height }, yMost);
   return (
     <View
       role="img"
@@ -65,40 +56,20 @@ function Plot({
       onLayout={(event) => setWidth(event.nativeEvent.layout.width)}
     >
       <Svg width="100%" height={height} aria-hidden>
-        {yTicks.map((tick) => (
-          <Line
-            key={`y${tick}`}
-            x1={margin.left}
-            x2={width - margin.right}
-            y1={y(tick)}
-            y2={y(tick)}
-            stroke={tick === 0 ? meaning.text : meaning.line}
-            strokeWidth={tick === 0 ? 2 : 1}
-          />
-        ))}
-        {[0, yMost].map((tick) => (
-          <SvgText key={`n${tick}`} x={margin.left - 8} y={y(tick) + 4} textAnchor="end" {...small}>
-            {formatY(tick)}
-          </SvgText>
-        ))}
-        {xTicks.map((tick) => (
-          <SvgText key={`x${tick}`} x={x(tick)} y={height - 6} textAnchor="middle" {...small}>
-            {formatX(tick)}
-          </SvgText>
-        ))}
+        <Axes scale={scale} width={width} yMost={yMost} {...formats} />
         {markers.map((marker, at) => (
           <MarkerLine
             key={marker.key}
             marker={marker}
-            x={x(marker.x)}
+            x={scale.x(marker.x)}
             end={at === 0 && markers.length > 1}
-            top={margin.top}
+            top={scale.margin.top}
           />
         ))}
         {series.map((each) => (
           <Path
             key={each.key}
-            d={pathOf(each.points)}
+            d={scale.pathOf(each.points)}
             fill="none"
             stroke={tones[each.tone].line}
             strokeWidth={each.dashed ? 2.5 : 3.5}
@@ -107,6 +78,42 @@ function Plot({
         ))}
       </Svg>
     </View>
+  );
+}
+
+type AxesProps = Pick<LineChartProps, 'formatX' | 'formatY'> & {
+  scale: ReturnType<typeof chartScale>;
+  width: number;
+  yMost: number;
+};
+
+function Axes({ scale, width, yMost, formatX = String, formatY = formatNumber }: AxesProps) {
+  const { x, y, xTicks, yTicks, margin } = scale;
+  const small = { fontFamily, fontSize: typeSize.small, fill: meaning.textSoft };
+  return (
+    <>
+      {yTicks.map((tick) => (
+        <Line
+          key={`y${tick}`}
+          x1={margin.left}
+          x2={width - margin.right}
+          y1={y(tick)}
+          y2={y(tick)}
+          stroke={tick === 0 ? meaning.text : meaning.line}
+          strokeWidth={tick === 0 ? 2 : 1}
+        />
+      ))}
+      {[0, yMost].map((tick) => (
+        <SvgText key={`n${tick}`} x={margin.left - 8} y={y(tick) + 4} textAnchor="end" {...small}>
+          {formatY(tick)}
+        </SvgText>
+      ))}
+      {xTicks.map((tick) => (
+        <SvgText key={`x${tick}`} x={x(tick)} y={height - 6} textAnchor="middle" {...small}>
+          {formatX(tick)}
+        </SvgText>
+      ))}
+    </>
   );
 }
 

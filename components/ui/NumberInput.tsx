@@ -1,7 +1,7 @@
 import { useState, type Ref } from 'react';
 import { text } from '@/shared/text/catalogue';
 import { Field, type FieldProps } from './Field';
-import { readDecimal, readWhole } from './read-number';
+import { readWhole } from './read-number';
 
 /** A number once it is understood; the text itself while it is not; null while empty. */
 export type TypedNumber = number | string | null;
@@ -21,30 +21,31 @@ type Props = FieldProps & {
 
 const asTyped = (value: TypedNumber) => (value === null ? '' : String(value));
 
-/** A whole number. Pasted "1 234" is understood; what is not understood stays and says so. */
-export function NumberInput({
-  value,
-  onChange,
-  onBlur,
-  steps,
-  large,
-  least = 0,
-  disabled,
-  inputRef,
-  ...field
-}: Props) {
+type Reading = Pick<Props, 'value' | 'onChange'> & { least: number };
+
+/** Keeps what was typed beside what it was read as, so that "1 234" stays as the person wrote it. */
+function useTyped({ value, onChange, least }: Reading) {
   const [typed, setTyped] = useState(asTyped(value));
-  const [left, setLeft] = useState(false);
-  const shown = readWhole(typed) === value ? typed : asTyped(value);
-  const misread = left && typeof value === 'string' && value.trim() !== '';
   const change = (next: TypedNumber, as: string) => {
     setTyped(as);
     onChange(next);
   };
-  const step = (by: 1 | -1) => {
-    const next = Math.max(least, (typeof value === 'number' ? value : 0) + by);
-    change(next, String(next));
+  return {
+    shown: readWhole(typed) === value ? typed : asTyped(value),
+    type: (as: string) => change(readWhole(as), as),
+    step: (by: 1 | -1) => {
+      const next = Math.max(least, (typeof value === 'number' ? value : 0) + by);
+      change(next, String(next));
+    },
   };
+}
+
+/** A whole number. Pasted "1 234" is understood; what is not understood stays and says so. */
+export function NumberInput({ value, onChange, onBlur, steps, large, least = 0, ...rest }: Props) {
+  const { disabled, inputRef, ...field } = rest;
+  const [left, setLeft] = useState(false);
+  const { shown, type, step } = useTyped({ value, onChange, least });
+  const misread = left && typeof value === 'string' && value.trim() !== '';
   const error = field.error ?? (misread ? text.ui.notANumber : undefined);
   return (
     <Field {...field} error={error}>
@@ -59,7 +60,7 @@ export function NumberInput({
             value={shown}
             disabled={disabled}
             onFocus={(event) => event.target.select()}
-            onChange={(event) => change(readWhole(event.target.value), event.target.value)}
+            onChange={(event) => type(event.target.value)}
             onBlur={() => {
               setLeft(true);
               onBlur?.();
@@ -102,47 +103,5 @@ function Steps({ label, large, disabled, step }: StepsProps) {
         +
       </button>
     </>
-  );
-}
-
-type MoneyProps = FieldProps & {
-  /** A decimal string, or what was typed while it is not one. */
-  value: string;
-  onChange: (value: string) => void;
-  onBlur?: () => void;
-  currency?: string;
-  disabled?: boolean;
-  inputRef?: Ref<HTMLInputElement> | undefined;
-};
-
-/** An amount or rate as a decimal string; "4,50" is understood. */
-export function MoneyInput({ value, onChange, onBlur, currency, disabled, inputRef, ...field }: MoneyProps) {
-  const [typed, setTyped] = useState(value);
-  const [left, setLeft] = useState(false);
-  const shown = readDecimal(typed) === value ? typed : value;
-  const misread = left && value !== '' && !/^-?\d+(\.\d+)?$/.test(value);
-  const error = field.error ?? (misread ? text.ui.notAnAmount : undefined);
-  return (
-    <Field {...field} label={currency ? `${field.label} (${currency})` : field.label} error={error}>
-      {(ties) => (
-        <input
-          {...ties}
-          ref={inputRef}
-          className="tk-input tk-input-figure"
-          inputMode="decimal"
-          autoComplete="off"
-          value={shown}
-          disabled={disabled}
-          onChange={(event) => {
-            setTyped(event.target.value);
-            onChange(readDecimal(event.target.value));
-          }}
-          onBlur={() => {
-            setLeft(true);
-            onBlur?.();
-          }}
-        />
-      )}
-    </Field>
   );
 }

@@ -43,39 +43,14 @@ function useArrival(title: string) {
 }
 
 /** One head, one main action, and a way back. */
-export function Page({ title, kicker, lead, back, action, beside, aside, narrow, children }: Props) {
-  useArrival(title);
+export function Page({ action, aside, narrow, children, ...head }: Props) {
+  useArrival(head.title);
   const at = useBreakpoint();
   const inBar = at === 'phone' || at === 'wide phone';
+  const padding = { padding: at === 'phone' ? space.l : space.xxl, paddingTop: inBar ? space.l : space.xl };
   return (
-    <View
-      style={[
-        styles.page,
-        { padding: at === 'phone' ? space.l : space.xxl, paddingTop: inBar ? space.l : space.xl },
-      ]}
-    >
-      <Box row wrap spread="between" align="end" gap="m">
-        <Box gap="xs">
-          {back === undefined ? null : (
-            <Link
-              href={back.href}
-              label={`‹ ${back.label}`}
-              name={text.ui.back(back.label)}
-              tone="soft"
-              strong={false}
-            />
-          )}
-          {kicker === undefined ? null : <Text variant="soft">{kicker}</Text>}
-          <Text variant="head" id="page-head">
-            {title}
-          </Text>
-          {lead === undefined ? null : <Text variant="soft">{lead}</Text>}
-        </Box>
-        <Box row wrap gap="m">
-          {beside}
-          {inBar ? null : action}
-        </Box>
-      </Box>
+    <View style={[styles.page, padding]}>
+      <Head {...head} action={inBar ? undefined : action} />
       <View style={aside !== undefined && at === 'broad' ? styles.split : styles.whole}>
         <View style={[styles.main, narrow && styles.narrow]}>{children}</View>
         {aside === undefined ? null : (
@@ -84,6 +59,35 @@ export function Page({ title, kicker, lead, back, action, beside, aside, narrow,
       </View>
       {inBar && action !== undefined ? <ActionBar>{action}</ActionBar> : null}
     </View>
+  );
+}
+
+type HeadProps = Pick<Props, 'title' | 'kicker' | 'lead' | 'back' | 'beside' | 'action'>;
+
+function Head({ title, kicker, lead, back, beside, action }: HeadProps) {
+  return (
+    <Box row wrap spread="between" align="end" gap="m">
+      <Box gap="xs">
+        {back === undefined ? null : (
+          <Link
+            href={back.href}
+            label={`‹ ${back.label}`}
+            name={text.ui.back(back.label)}
+            tone="soft"
+            strong={false}
+          />
+        )}
+        {kicker === undefined ? null : <Text variant="soft">{kicker}</Text>}
+        <Text variant="head" id="page-head">
+          {title}
+        </Text>
+        {lead === undefined ? null : <Text variant="soft">{lead}</Text>}
+      </Box>
+      <Box row wrap gap="m">
+        {beside}
+        {action}
+      </Box>
+    </Box>
   );
 }
 

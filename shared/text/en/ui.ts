@@ -17,6 +17,7 @@ export const ui = {
   choose: 'Choose…',
   addPhoto: '+ photo',
   addPaper: '+ paper',
+  addFile: '+ file',
   removeFile: (name: string) => `Remove ${name}`,
   fileTooLarge: (name: string, most: string) => `${name} is larger than ${most}, so it was not added.`,
   fileNotTaken: (name: string) => `${name} is not a photo or a PDF, so it was not added.`,

@@ -1,7 +1,8 @@
 import { render, screen } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { useState } from 'react';
-import { MoneyInput, NumberInput, type TypedNumber } from '@/components/ui/NumberInput';
+import { MoneyInput } from '@/components/ui/MoneyInput';
+import { NumberInput, type TypedNumber } from '@/components/ui/NumberInput';
 import { readDecimal, readWhole } from '@/components/ui/read-number';
 
 test.each([
