@@ -1,8 +1,7 @@
-import { pnorm, qnorm } from 'lib-r-math.js';
-
 import { type CountDistribution, negativeBinomial, poisson } from './count-distribution';
 import { type Peak } from './peak';
 import { roundUp } from './round-up';
+import { normalAtMost, normalQuantile } from './standard-normal';
 
 export type Distribution = 'poisson' | 'negative binomial' | 'normal';
 
@@ -31,7 +30,8 @@ export function countAtPeak(peak: Peak): CountDistribution {
 function normal({ mean, variance }: Peak): CountDistribution {
   const sd = Math.sqrt(variance);
   return {
-    atMost: (containers) => (sd === 0 ? Number(containers + 0.5 >= mean) : pnorm(containers + 0.5, mean, sd)),
-    smallestCovering: (probability) => roundUp(mean + qnorm(probability) * sd - 0.5),
+    atMost: (containers) =>
+      sd === 0 ? Number(containers + 0.5 >= mean) : normalAtMost((containers + 0.5 - mean) / sd),
+    smallestCovering: (probability) => roundUp(mean + normalQuantile(probability) * sd - 0.5),
   };
 }

@@ -1,5 +1,4 @@
-import { pgamma } from 'lib-r-math.js';
-
+import { gammaSurvival } from './gamma-survival';
 import { type PoolInput } from './input';
 import { CannotSize } from './refusal';
 
@@ -36,7 +35,7 @@ export function gammaShape({ mean, sd }: LoopTime): number {
 export function stillOutAfter(loop: LoopTime): number[] {
   const shape = gammaShape(loop);
   const survival = (days: number): number =>
-    shape === Infinity ? Number(loop.mean > days) : pgamma(days, shape, undefined, loop.mean / shape, false);
+    shape === Infinity ? Number(loop.mean > days) : gammaSurvival((days * shape) / loop.mean, shape);
   const shares: number[] = [];
   for (let days = 0; ; days += 1) {
     const share = survival(days);
