@@ -7,10 +7,10 @@ const config = getDefaultConfig(__dirname);
 const here = (file) => ({ type: 'sourceFile', filePath: path.join(__dirname, file) });
 const nothing = { type: 'empty' };
 
-// What the first load leaves out, by who asks and for what: navigators and link previews of the router (the app has
-// one Slot, and links of its own), animated lists and old touchables of the components (the app has none), zod's
-// JSON Schema (the server's) and all of its languages but one. Whoever needs one of them takes its line out and looks
-// at the size of the first load.
+// What the first load leaves out, by who asks and for what: all of zod's languages but one and its JSON Schema (the
+// server's); navigators and link previews of the router (the app has one Slot, and links of its own); drawings read
+// from text; animated lists and old touchables (the app has none). Whoever needs one of them takes its line out and
+// looks at the size of the first load.
 const leftOut = [
   [/^zod\//, /(^|\/)locales(\/index\.c?js)?$/, here('components/data/zod-locales.ts')],
   [
@@ -23,6 +23,7 @@ const leftOut = [
   [/^expo-router\/build\//, /(^|\/)(react-navigation\/(bottom-tabs|elements)|native-tabs(\/\w+)?)$/, nothing],
   [/^expo-router\/build\/ExpoRoot/, /^\.\/screensFeatureFlags$/, here('components/shell/slot-router.ts')],
   [/^expo-router\/build\/link\//, /^\.\/(elements|LinkWithPreview)$/, nothing],
+  [/^react-native-svg\//, /^\.\/(xml|deprecated|utils\/fetchData|transform|transformToRn)$/, nothing],
   [
     /^(react-native-web|expo|expo-router|react-native-screens)\//,
     /(exports|\.\.)\/(Animated|FlatList|SectionList|VirtualizedList|Touchable\w+|LayoutAnimation|Modal|RefreshControl|CheckBox|ProgressBar)$/,

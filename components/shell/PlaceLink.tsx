@@ -53,14 +53,7 @@ export function BarLink({ place, current, waiting }: Props) {
 const styles = StyleSheet.create({
   rail: { borderRadius: radius, paddingHorizontal: space.m, marginHorizontal: 0 },
   railCurrent: { backgroundColor: meaning.actionWash },
-  bar: {
-    flexGrow: 1,
-    flexShrink: 1,
-    alignItems: 'center',
-    minHeight: 56,
-    justifyContent: 'center',
-    minWidth: 0,
-  },
+  bar: { flexGrow: 1, flexShrink: 1, minHeight: 56, minWidth: 44, justifyContent: 'center' },
   marker: { position: 'absolute', top: -1, left: 8, right: 8, height: 4 },
   markerCurrent: { backgroundColor: meaning.action },
 });
