@@ -158,8 +158,8 @@ module.exports = [
         noServerPackages,
         noClientPackages,
         {
-          regex: '^(?!(@/shared|\\.|zod|decimal\\.js|lib-r-math\\.js))',
-          message: `shared/ takes zod, decimal.js and statistics only. ${why}`,
+          regex: '^(?!(@/shared|\\.|zod|decimal\\.js))',
+          message: `shared/ takes zod and decimal.js only. ${why}`,
         },
       ],
     }),
@@ -176,8 +176,8 @@ module.exports = [
         patterns: [
           { regex: leaves, message: `The domain imports only the domain. ${why}` },
           {
-            regex: '^(?!(\\.|zod$|decimal\\.js$|lib-r-math\\.js))',
-            message: `The domain takes zod, decimal.js and statistics only. ${why}`,
+            regex: '^(?!(\\.|zod$|decimal\\.js$))',
+            message: `The domain takes zod and decimal.js only. ${why}`,
           },
         ],
       }),
