@@ -1,6 +1,6 @@
 import type { ProblemCode } from '../../problems/problems';
 import { plural } from '../plural';
-import { formatUnits } from '../format';
+import { formatMonth, formatUnits } from '../format';
 
 type Data = Record<string, unknown>;
 export type ClientProblemCode = ProblemCode | 'no connection' | 'answer not understood';
@@ -9,6 +9,9 @@ const word = (data: Data, key: string, otherwise: string) =>
   typeof data[key] === 'string' && data[key] !== '' ? (data[key] as string) : otherwise;
 const whole = (data: Data, key: string) =>
   typeof data[key] === 'number' ? (data[key] as number) : undefined;
+
+const month = (data: Data, otherwise: string) =>
+  typeof data.month === 'string' ? formatMonth(data.month) : otherwise;
 
 function more(data: Data): string {
   const open = whole(data, 'open');
@@ -66,10 +69,19 @@ export const problems: Record<ClientProblemCode, (data: Data) => string> = {
     `${word(data, 'by', 'Someone')} has settled this already. Nothing was posted twice.`,
   'already answered': (data) =>
     `${word(data, 'by', 'Someone')} has answered this already. Your answer was not posted.`,
+  'objection over': () =>
+    'The days to object to this statement are over, so its lines stand. You can still dispute the count behind them, on its shipment.',
   'already closed': () => 'This month is closed already. Nothing was changed.',
   'already issued': () => 'This statement went out already. Nothing was sent twice.',
   'month closed': () => 'This month is closed. Post it as a correction, or ask finance to reopen.',
   'month not closed': () => 'This month is still open. Close it first.',
+  'month not over': () => 'This month is not over yet. Close it after its last day.',
+  'earlier month open': (data) =>
+    `${month(data, 'An earlier month')} is still open. Close it first: months close in their order.`,
+  'earlier statement waits': (data) =>
+    `The statement of ${month(data, 'an earlier month')} has not gone out yet. Issue it first: this one builds on it.`,
+  'dispute open': () =>
+    'A dispute of this statement is not decided yet. Confirm when it is, or withdraw the dispute.',
   'state changed': () =>
     'Someone changed this while you were at it. Nothing was stored; reload to see how it stands now.',
   'more than open': more,
