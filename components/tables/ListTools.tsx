@@ -1,9 +1,10 @@
-import { useEffect, useState } from 'react';
+import { useEffect, useState, type ReactNode } from 'react';
 import { text } from '@/shared/text/catalogue';
 import { useIsWide } from '../theme/use-breakpoint';
 import { Box } from '../ui/Box';
 import { Button } from '../ui/Button';
 import { DateInput } from '../ui/DateInput';
+import { Disclosure } from '../ui/Disclosure';
 import { DownloadLink } from '../ui/Link';
 import { Select, type Option } from '../ui/Select';
 import { TextInput } from '../ui/TextInput';
@@ -25,14 +26,19 @@ type Props<Row> = {
 /** Search, filters, sort (on cards; tables sort by their heads) and downloads above a list. */
 export function ListTools<Row>({ state, filters, searchLabel, columns, downloads }: Props<Row>) {
   const wide = useIsWide();
-  const sortable = columns.filter((column) => column.sortable);
-  return (
-    <Box row wrap gap="m" align="end">
-      {searchLabel === undefined ? null : <SearchInput label={searchLabel} state={state} />}
+  const sortable = wide ? [] : columns.filter((column) => column.sortable);
+  const choices = (
+    <>
       {filters.map((filter) => (
         <FilterInput key={filter.key} filter={filter} state={state} />
       ))}
-      {!wide && sortable.length > 0 ? <SortSelect state={state} columns={sortable} /> : null}
+      {sortable.length > 0 ? <SortSelect state={state} columns={sortable} /> : null}
+    </>
+  );
+  return (
+    <Box row wrap gap="m" align="end">
+      {searchLabel === undefined ? null : <SearchInput label={searchLabel} state={state} />}
+      {wide ? choices : null}
       {state.isFiltered ? (
         <Box>
           <Button kind="quiet" label={text.ui.clearFilters} onPress={state.clear} />
@@ -43,6 +49,21 @@ export function ListTools<Row>({ state, filters, searchLabel, columns, downloads
           <DownloadLink href={download.href} label={download.label} kind="quiet" />
         </Box>
       ))}
+      {!wide && filters.length + sortable.length > 0 ? <Folded state={state}>{choices}</Folded> : null}
+    </Box>
+  );
+}
+
+/** On a phone the list comes first: filters and sort open on demand, and stay open while one is set. */
+function Folded({ state, children }: { state: ListState; children: ReactNode }) {
+  const someSet = Object.values(state.filters).some((value) => value !== '');
+  return (
+    <Box grow least={300}>
+      <Disclosure label={text.ui.filterAndSort} open={someSet}>
+        <Box row wrap gap="m" align="end">
+          {children}
+        </Box>
+      </Disclosure>
     </Box>
   );
 }
@@ -68,10 +89,11 @@ function SearchInput({ label, state }: { label: string; state: ListState }) {
 }
 
 function FilterInput({ filter, state }: { filter: Filter; state: ListState }) {
+  const wide = useIsWide();
   const value = state.filters[filter.key] ?? '';
   const change = (next: string) => state.set(filter.key, next);
   return (
-    <Box least={160}>
+    <Box grow={!wide} least={150}>
       {'options' in filter ? (
         <Select
           label={filter.label}
@@ -93,7 +115,7 @@ function SortSelect<Row>({ state, columns }: { state: ListState; columns: readon
     { value: nextSort(key, key), label: `${head}, ${text.ui.descending}` },
   ]);
   return (
-    <Box least={160}>
+    <Box grow least={150}>
       <Select
         label={text.ui.sortedBy}
         options={options}

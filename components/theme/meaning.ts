@@ -46,6 +46,8 @@ export const usedPairs: readonly { text: ColourName; ground: ColourName; least: 
   ...(['spruce', 'slate', 'straw', 'kiln', 'plum'] as const).flatMap((name) => [
     { text: name, ground: `${name}-wash` as const, least: 4.5 as const },
     { text: 'ink' as const, ground: `${name}-wash` as const, least: 4.5 as const },
+    { text: 'soft' as const, ground: `${name}-wash` as const, least: 4.5 as const },
     { text: 'card' as const, ground: name, least: 4.5 as const },
   ]),
+  { text: 'paper', ground: 'ink', least: 4.5 },
 ];

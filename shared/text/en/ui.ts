@@ -32,6 +32,7 @@ export const ui = {
   draftKept: 'What you typed earlier is still here.',
   startFresh: 'Start with an empty form',
   search: 'Search',
+  filterAndSort: 'Filter and sort',
   sortedBy: 'Sort by',
   ascending: 'first to last',
   descending: 'last to first',
