@@ -1,8 +1,13 @@
+import { eq } from 'drizzle-orm';
 import type { Database } from '@/db/client';
+import { outbox } from '@/db/schema/work';
 import { outsideAccount, siteAccount } from '@/server/modules/ledger/accounts';
 import { postEntry } from '@/server/modules/ledger/post-entry';
 import { addDays, firstDayOfMonth, lastDayOfMonth, monthOf, previousMonth } from '@/shared/domain/calendar';
 import { bookOf } from './book';
+import { disputeLoss, loseAtKestrel, playDisputes } from './disputes';
+import { playEpisodes } from './episodes';
+import { endMonth } from './month-end';
 import { drawsFrom } from './random';
 import { companies } from './scenario-companies';
 import { openingStock } from './scenario-lanes';
@@ -29,10 +34,36 @@ export async function seedDemo(db: Database, { today, say }: Demo): Promise<void
     underway: [],
   };
   await openTheBook(world, opened);
+  const lastClosed = backBy(openMonth, 1);
   for (let day = opened; day <= today; day = addDays(day, 1)) {
     await liveDay(world, day, { settle: day <= addDays(today, -8) });
+    if (day === `${lastClosed}-20`) await loseAtKestrel(world.book, day);
+    if (day.endsWith('-04')) await turnOfMonth(world, { day, openMonth, lastClosed });
     if (day === lastDayOfMonth(day.slice(0, 7))) say(`moved through ${monthOf(day)}`);
   }
+  await disputeLoss(world.book, { month: lastClosed, on: `${openMonth}-10` });
+  await playEpisodes(world.book, today);
+  await playDisputes(world.book, today);
+  await captureLetters(db, `${today}T05:00:00.000Z`);
+}
+
+/** On the fourth of the month finance ends the one before; Kestrel and Orrin have not answered the latest yet. */
+async function turnOfMonth(
+  world: World,
+  { day, openMonth, lastClosed }: { day: string; openMonth: string; lastClosed: string },
+): Promise<void> {
+  const month = previousMonth(monthOf(day));
+  if (month >= openMonth || month < backBy(openMonth, 4)) return;
+  await endMonth(world.book, {
+    month,
+    on: day,
+    unanswered: month === lastClosed ? ['KESTREL', 'ORRIN'] : [],
+  });
+}
+
+/** The demo's letters were written in the past: they are there to be read, and none of them goes out. */
+async function captureLetters(db: Database, sentAt: string): Promise<void> {
+  await db.update(outbox).set({ state: 'captured', sentAt }).where(eq(outbox.state, 'waiting'));
 }
 
 function backBy(month: string, months: number): string {

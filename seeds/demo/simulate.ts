@@ -61,7 +61,7 @@ function countedLine(
   draws: Draws,
   isReturn: boolean,
 ): CountedLine {
-  const miscount = draws.perMille(35) ? draws.whole(1, Math.max(1, Math.round(line.declared / 40))) : 0;
+  const miscount = draws.perMille(55) ? draws.whole(1, Math.max(1, Math.round(line.declared / 40))) : 0;
   const counted = Math.max(0, line.declared + (draws.perMille(180) ? miscount : -miscount));
   const damaged = isReturn && draws.perMille(60) ? draws.whole(1, 3) : 0;
   const dirty = isReturn && draws.perMille(120) ? draws.whole(1, Math.max(1, Math.round(counted / 12))) : 0;
