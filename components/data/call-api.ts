@@ -10,7 +10,7 @@ export type Call<O extends Operation> = {
   params?: ParamsOf<O>;
   query?: QueryInputOf<O>;
   body?: BodyInputOf<O>;
-  /** Files of a multipart form, by field name; the rest of the body goes along as JSON under "data". */
+  /** Files of a multipart form, by field name; the rest of the body goes along as JSON under "body". */
   files?: Record<string, readonly File[]>;
   /** Client-made id of this attempt; kept for retries, so that one intent has one effect. */
   key?: string;
@@ -68,7 +68,7 @@ async function send<O extends Operation>(operation: O, call: Call<O>): Promise<R
 function bodyOf<O extends Operation>(operation: O, call: Call<O>): string | FormData | undefined {
   if (operation.sends !== 'files') return call.body === undefined ? undefined : JSON.stringify(call.body);
   const form = new FormData();
-  form.append('data', JSON.stringify(call.body ?? {}));
+  form.append('body', JSON.stringify(call.body ?? {}));
   for (const [field, files] of Object.entries(call.files ?? {})) {
     for (const file of files) form.append(field, file, file.name);
   }

@@ -1,4 +1,5 @@
 import type { z } from 'zod';
+import { fieldMessage } from '@/shared/text/field-message';
 import { type BadField, Problem } from '@/shared/problems/problems';
 
 /** Parses by schema; all bad fields at once, each by its path within `where`. */
@@ -8,7 +9,7 @@ export function parsed(
   where: 'params' | 'query' | 'body',
 ): unknown {
   if (!schema) return undefined;
-  const result = schema.safeParse(value);
+  const result = schema.safeParse(value, { error: fieldMessage });
   if (result.success) return result.data;
   if (where === 'params') throw new Problem('not found');
   throw new Problem('not valid', { fields: badFieldsOf(result.error) });

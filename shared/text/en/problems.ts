@@ -1,6 +1,6 @@
 import type { ProblemCode } from '../../problems/problems';
 import { plural } from '../plural';
-import { formatMonth, formatUnits } from '../format';
+import { formatInstant, formatMonth, formatUnits } from '../format';
 
 type Data = Record<string, unknown>;
 export type ClientProblemCode = ProblemCode | 'no connection' | 'answer not understood';
@@ -13,6 +13,12 @@ const whole = (data: Data, key: string) =>
 const month = (data: Data, otherwise: string) =>
   typeof data.month === 'string' ? formatMonth(data.month) : otherwise;
 
+/** ", 27 November 2026, 14:10" in the reader's own zone, from the instant that the server gives as `at`. */
+function when(data: Data): string {
+  const zone = new Intl.DateTimeFormat().resolvedOptions().timeZone;
+  return typeof data.at === 'string' ? `, ${formatInstant(data.at, zone)}` : '';
+}
+
 function more(data: Data): string {
   const open = whole(data, 'open');
   return open === undefined
@@ -21,7 +27,7 @@ function more(data: Data): string {
 }
 
 function tooMany(data: Data): string {
-  const seconds = whole(data, 'retryAfterSeconds');
+  const seconds = whole(data, 'seconds');
   const minutes = seconds === undefined ? undefined : Math.max(1, Math.ceil(seconds / 60));
   return minutes === undefined
     ? 'Too many tries. Wait a few minutes, then try again.'
@@ -63,7 +69,7 @@ export const problems: Record<ClientProblemCode, (data: Data) => string> = {
     `${word(data, 'what', 'This')} exists already. Choose another, or open the one there is.`,
   'already counted': (data) => {
     const by = word(data, 'by', 'Someone');
-    return `${by} has counted this already${data.when ? `, ${word(data, 'when', '')}` : ''}. Your count was not posted.`;
+    return `${by} has counted this already${when(data)}. Your count was not posted.`;
   },
   'already settled': (data) =>
     `${word(data, 'by', 'Someone')} has settled this already. Nothing was posted twice.`,
