@@ -1,0 +1,24 @@
+import * as contracts from '@/shared/contracts/pool';
+import { post, read, type Route } from '../../http/route';
+import { approvePoolSize } from './approve';
+import { poolPage } from './list-pool';
+import { savePlanOf } from './plan-rows';
+import { approvalsPage, poolOfType, previewOf } from './read-pool';
+
+export const poolRoutes: Route[] = [
+  read(contracts.listPool, 'see pool', ({ db, query }) => poolPage(db, query)),
+  read(contracts.readPool, 'see pool', ({ db, params, at }) =>
+    poolOfType(db, { typeCode: params.type, now: at.now }),
+  ),
+  read(contracts.previewPool, 'see pool', ({ db, params, body }) => previewOf(db, params.type, body)),
+  read(contracts.listApprovals, 'see pool', ({ db, params, query }) =>
+    approvalsPage(db, { typeCode: params.type, query }),
+  ),
+  post(contracts.savePlan, 'plan pool', async ({ tx, params, body, person, at }) => {
+    await savePlanOf(tx, { typeCode: params.type, plan: body, personId: person.id, now: at.now });
+    return { type: params.type };
+  }),
+  post(contracts.approvePool, 'approve pool', async ({ tx, params, body, person, at }) => ({
+    id: await approvePoolSize(tx, { typeCode: params.type, form: body, personId: person.id, now: at.now }),
+  })),
+];
