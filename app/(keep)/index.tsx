@@ -1,0 +1,5 @@
+import { TodayScreen } from '@/components/today/TodayScreen';
+
+export default function TodayRoute() {
+  return <TodayScreen />;
+}

@@ -1,0 +1,5 @@
+import { ShipmentsScreen } from '@/components/shipments/ShipmentsScreen';
+
+export default function ShipmentsRoute() {
+  return <ShipmentsScreen />;
+}

@@ -1,0 +1,5 @@
+import { SendScreen } from '@/components/shipments/SendScreen';
+
+export default function SendRoute() {
+  return <SendScreen />;
+}

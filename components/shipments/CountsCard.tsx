@@ -1,0 +1,52 @@
+import { downloadFile } from '@/shared/contracts/files';
+import type { ShipmentDetail } from '@/shared/contracts/shipments';
+import { text } from '@/shared/text/catalogue';
+import { formatInstant } from '@/shared/text/format';
+import { urlOf } from '../data/url-of';
+import { Box } from '../ui/Box';
+import { Card } from '../ui/Card';
+import { StoredFile, StoredFiles } from '../ui/StoredFile';
+import { Text } from '../ui/Text';
+
+const words = text.shipments;
+type Count = ShipmentDetail['counts'][number];
+
+/** Who counted and when, with note and photos. */
+export function CountsCard({ shipment }: { shipment: ShipmentDetail }) {
+  if (shipment.counts.length === 0) return null;
+  return (
+    <Card title={words.countsHead}>
+      {shipment.counts.map((count) => (
+        <OneCount key={count.id} count={count} timeZone={shipment.timeZone} />
+      ))}
+    </Card>
+  );
+}
+
+function OneCount({ count, timeZone }: { count: Count; timeZone: string }) {
+  return (
+    <Box gap="s">
+      <Text>{saidOf(count, formatInstant(count.countedAt, timeZone))}</Text>
+      {count.sequence > 1 ? <Text variant="soft">{words.laterCount(count.sequence)}</Text> : null}
+      {count.note === '' ? null : <Text>{count.note}</Text>}
+      {count.photos.length === 0 ? null : (
+        <StoredFiles>
+          {count.photos.map(({ id, name, mediaType }) => (
+            <StoredFile
+              key={id}
+              name={name}
+              href={urlOf(downloadFile, { params: { file: id } })}
+              isPicture={mediaType.startsWith('image/')}
+            />
+          ))}
+        </StoredFiles>
+      )}
+    </Box>
+  );
+}
+
+function saidOf(count: Count, when: string): string {
+  if (count.source === 'automatic') return words.countedAutomatically(when);
+  if (count.by !== null) return words.countedBy(count.by, when);
+  return count.source === 'import' ? words.countedByImport(when) : words.countedOn(when);
+}

@@ -1,0 +1,46 @@
+import { listShipments, type ShipmentRow } from '@/shared/contracts/shipments';
+import { text } from '@/shared/text/catalogue';
+import { useReadPages } from '../data/use-operation';
+import { useSignedIn } from '../data/use-session';
+import { RecordList } from '../tables/RecordList';
+import type { Filter } from '../tables/ListTools';
+import { useListState } from '../tables/use-list-state';
+import { ButtonLink } from '../ui/Link';
+import { Page } from '../ui/Page';
+import { shipmentColumns } from './shipment-columns';
+
+const words = text.shipments;
+
+const optionsOf = (labels: Record<string, string>) =>
+  Object.entries(labels).map(([value, label]) => ({ value, label }));
+
+const filters: readonly Filter[] = [
+  { key: 'direction', label: words.filter.direction, options: optionsOf(words.direction) },
+  { key: 'state', label: words.filter.state, options: optionsOf(words.state) },
+  { key: 'contents', label: words.filter.contents, options: optionsOf(words.contents) },
+];
+
+export function ShipmentsScreen() {
+  const { may, company } = useSignedIn();
+  const state = useListState({ filters: ['direction', 'state', 'contents', 'partner'] });
+  const list = useReadPages(listShipments, { query: state.query as never });
+  const sends = company.kind === 'operator' ? 'empties' : 'fulls';
+  const send = may('send shipments') ? (
+    <ButtonLink href="/shipments/send" label={words.send[sends]} />
+  ) : undefined;
+  return (
+    <Page title={words.head} action={send}>
+      <RecordList<ShipmentRow>
+        label={words.head}
+        list={list}
+        columns={shipmentColumns}
+        rowKey={(row) => row.id}
+        rowHref={(row) => `/shipments/${row.id}`}
+        state={state}
+        filters={filters}
+        searchLabel={words.search}
+        empty={{ title: words.empty, hint: words.emptyHint[sends] }}
+      />
+    </Page>
+  );
+}

@@ -1,0 +1,81 @@
+import type { Today } from '@/shared/contracts/today';
+import { text } from '@/shared/text/catalogue';
+import { formatDay } from '@/shared/text/format';
+import { Card } from '../ui/Card';
+import { Figure } from '../ui/Figure';
+import { Link } from '../ui/Link';
+import { Sheet, type SheetColumn } from '../ui/Sheet';
+import { Tag } from '../ui/Tag';
+import { WorkCard } from './WorkCard';
+
+const words = text.today;
+type Row = NonNullable<Today['differences']>['rows'][number];
+
+const saidOf = ({ openUnits, typeName }: Pick<Row, 'openUnits' | 'typeName'>) => ({
+  tone: 'differs' as const,
+  label: openUnits < 0 ? words.fewer(-openUnits, typeName) : words.more(openUnits, typeName),
+});
+
+const columns: readonly SheetColumn<Row>[] = [
+  { key: 'shipment', head: words.column.shipment, cell: (row) => row.reference },
+  { key: 'between', head: words.column.between, cell: (row) => words.between(row.from, row.to) },
+  { key: 'what', head: words.column.what, cell: (row) => <Tag {...saidOf(row)} /> },
+  { key: 'openFor', head: words.column.openFor, align: 'end', cell: (row) => words.openFor(row.openDays) },
+  {
+    key: 'atStake',
+    head: words.column.atStake,
+    align: 'end',
+    cell: (row) => <Figure money={row.atStake.amount} currency={row.atStake.currency} plain />,
+  },
+  {
+    key: 'action',
+    head: '',
+    align: 'end',
+    cell: (row) => (
+      <Link href={`/differences/${row.id}`} label={words.settle} name={words.settleOf(row.reference)} />
+    ),
+  },
+];
+
+/** The coordinator's: the oldest first, with what is at stake. */
+export function DifferencesCard({ today }: { today: Today }) {
+  const { differences } = today;
+  if (!differences || differences.total === 0) return null;
+  return (
+    <Card
+      title={words.differences}
+      beside={<Link href="/differences" label={words.all(differences.total)} />}
+      grow
+      least={560}
+    >
+      <Sheet
+        caption={words.differences}
+        hideCaption
+        columns={columns}
+        rows={differences.rows}
+        rowKey={(row) => row.id}
+        stack
+      />
+    </Card>
+  );
+}
+
+/** A partner's: what differed on its own shipments, the latest first. */
+export function OwnDifferencesCard({ today }: { today: Today }) {
+  const rows = today.ownDifferences ?? [];
+  if (rows.length === 0) return null;
+  return (
+    <WorkCard
+      rows={rows.map((row) => ({
+        key: row.id,
+        tag: saidOf(row),
+        lines: [words.countedOn(row.reference, formatDay(row.openedOn, 'date'))],
+        action: {
+          href: `/shipments/${row.shipmentId}`,
+          label: words.open,
+          name: words.openOf(row.reference),
+        },
+      }))}
+    />
+  );
+}
