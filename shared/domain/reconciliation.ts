@@ -43,7 +43,9 @@ function settleByReference(desk: Desk): Candidate[] {
   const { claims, torn } = readClaims(index, desk.receipts);
   const doubts = settlePlainClaims(desk, claims);
   const near = new NearShipments(desk);
-  settleNearCombined(desk, index, near);
+  const inDoubt = new Set(doubts.flatMap(({ claim }) => claim.receipts));
+  const unclaimed = desk.openReceipts().filter((receipt) => !inDoubt.has(receipt));
+  settleNearCombined(desk, unclaimed, { index, near });
   return [...torn.flatMap((one) => candidatesOf(desk, one)), ...settleMistyped(desk, doubts, near)];
 }
 

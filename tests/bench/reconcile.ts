@@ -54,7 +54,7 @@ export function measureReconciliation(seeds: readonly number[] = SEEDS): Figures
     shortfalls(score).map((what) => `${shipments} shipments: ${what}`),
   );
   const ratio = large.ms / small.ms;
-  if (!(ratio <= MOST_TIMES_AS_LONG)
+  if (!(ratio <= MOST_TIMES_AS_LONG))
     missed.push(`${LARGE.shipments} shipments take ${ratio.toFixed(1)} times as long`);
   if (missed.length > 0) throw new Error(missed.join('\n'));
   return { small, large, ratio };

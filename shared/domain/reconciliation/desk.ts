@@ -33,8 +33,11 @@ export class Desk {
   }
 
   pair(pairing: Pairing): void {
+    for (const paper of [...pairing.shipments, ...pairing.receipts]) {
+      if (!this.isOpen(paper)) throw new Error(`${paper.id} is settled twice`);
+      this.paired.set(paper, pairing);
+    }
     this.pairings.push(pairing);
-    for (const paper of [...pairing.shipments, ...pairing.receipts]) this.paired.set(paper, pairing);
   }
 
   /** A further part of a delivery that was taken for whole. */

@@ -1,7 +1,6 @@
 import type { Claim } from './claims';
 import type { Candidate } from './contest';
 import { likenessOf, unitsApart } from './contents';
-import type { Delivery } from './deliveries';
 import type { Desk } from './desk';
 import type { Paper } from './papers';
 import { accept, declaredOf, type Doubt } from './same-reference';
@@ -16,7 +15,7 @@ type Elsewhere = (receipt: Paper) => Candidate[];
  */
 export function settleDoubts(desk: Desk, doubts: readonly Doubt[], alternatives: Elsewhere): Candidate[] {
   const left: Candidate[] = [];
-  for (const { claim, delivery } of doubts) {
+  for (const { claim, delivery } of doubts.filter((doubt) => isOpen(desk, doubt))) {
     const best = clearBest(rank(desk, claim, delivery.parts));
     const elsewhere = (receipt: Paper) =>
       alternatives(receipt).filter(({ shipment }) => !claim.shipments.includes(shipment));
@@ -26,6 +25,9 @@ export function settleDoubts(desk: Desk, doubts: readonly Doubt[], alternatives:
   }
   return left;
 }
+
+const isOpen = (desk: Desk, { claim, delivery }: Doubt): boolean =>
+  [...claim.shipments, ...delivery.parts].every((paper) => desk.isOpen(paper));
 
 interface Choice extends Doubt {
   best: Candidate;

@@ -1,7 +1,7 @@
 import { type Candidate, settle } from './contest';
 import type { Desk } from './desk';
 import { settleDoubts } from './doubts';
-import { NearShipments } from './near-reference';
+import type { NearShipments } from './near-reference';
 import { OtherSites } from './other-site';
 import type { Paper } from './papers';
 import { settleMistypedRests } from './rest-of-split';
@@ -26,10 +26,7 @@ export function settleMistyped(desk: Desk, doubts: readonly Doubt[], near: NearS
     (candidate) => mayMatch(candidate) && !undecided.has(candidate.receipt),
   );
   for (const { receipt } of settled) for (const twin of again.get(receipt) ?? []) desk.double(twin, receipt);
-  const open = doubts.filter(({ claim, delivery }) =>
-    [...claim.shipments, ...delivery.parts].every((paper) => desk.isOpen(paper)),
-  );
-  const stillInDoubt = settleDoubts(desk, open, alternatives);
+  const stillInDoubt = settleDoubts(desk, doubts, alternatives);
   return [...stillInDoubt, ...found];
 }
 

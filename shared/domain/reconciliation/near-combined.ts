@@ -12,8 +12,12 @@ const MOST_READINGS = 50;
  * A receipt that names several references of which some are mistyped: combined when exactly one reading
  * of the parts adds up to what was counted.
  */
-export function settleNearCombined(desk: Desk, index: ReferenceIndex, near: NearShipments): void {
-  for (const receipt of desk.openReceipts()) {
+export function settleNearCombined(
+  desk: Desk,
+  receipts: readonly Paper[],
+  { index, near }: { index: ReferenceIndex; near: NearShipments },
+): void {
+  for (const receipt of receipts) {
     const readings = readingsOf(receipt, (reference) => {
       const exact = index.find(receipt, reference).filter((shipment) => desk.isOpen(shipment));
       return exact.length > 0 ? exact : near.around(receipt, reference);

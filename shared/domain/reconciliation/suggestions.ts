@@ -39,10 +39,8 @@ export function suggest(desk: Desk, candidates: readonly Candidate[]): Suggestio
       rule: candidate.rule,
       score,
       why: whyOf(candidate, {
-        shipments: all.filter((o) => o.candidate !== candidate).map((o) => o.candidate.shipment.id),
-        receipts: (byShipment.get(candidate.shipment) ?? [])
-          .filter((o) => o.candidate !== candidate)
-          .map((o) => o.candidate.receipt.id),
+        shipments: all.filter((o) => o.candidate !== candidate).map((o) => o.candidate.shipment),
+        receipts: (byShipment.get(candidate.shipment)?.length ?? 1) - 1,
       }),
     }));
 }

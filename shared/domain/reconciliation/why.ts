@@ -1,4 +1,5 @@
 import type { Candidate } from './contest';
+import type { Paper } from './papers';
 
 const READ_AS: Record<Candidate['rule'], string> = {
   'same reference': 'The same reference',
@@ -16,19 +17,22 @@ const CONTENTS = [
   'other contents',
 ] as const;
 
-/** One plain sentence: what speaks for the pair, and what else it could be. */
-export function whyOf(candidate: Candidate, rivals: { shipments: string[]; receipts: string[] }): string {
-  const days = candidate.receipt.day - candidate.shipment.day;
-  const way = days === 0 ? 'on the same day' : days === 1 ? '1 day on the way' : `${days} days on the way`;
-  const also = [...rivals.shipments, ...rivals.receipts];
-  const rival = also.length > 0 ? `; ${list(also)} could be meant as well` : '';
-  return `${READ_AS[candidate.rule]}, ${CONTENTS[candidate.likeness]}, ${way}${rival}.`;
-}
-
 const MOST_NAMED = 3;
 
-function list(names: string[]): string {
-  const named = names.slice(0, MOST_NAMED);
-  const more = names.length - named.length;
-  return more > 0 ? `${named.join(', ')} and ${more} more` : named.join(', ');
+/** One plain sentence: what speaks for the pair, and what else it could be. */
+export function whyOf(candidate: Candidate, rivals: { shipments: Paper[]; receipts: number }): string {
+  const days = candidate.receipt.day - candidate.shipment.day;
+  const way = days === 0 ? 'on the same day' : days === 1 ? '1 day on the way' : `${days} days on the way`;
+  const evidence = `${READ_AS[candidate.rule]}, ${CONTENTS[candidate.likeness]}, ${way}`;
+  return `${[evidence, ...otherShipments(rivals.shipments), ...otherReceipts(rivals.receipts)].join('; ')}.`;
 }
+
+function otherShipments(shipments: Paper[]): string[] {
+  if (shipments.length === 0) return [];
+  const names = shipments.slice(0, MOST_NAMED).map(({ text, id }) => text?.trim() || id);
+  const more = shipments.length - names.length;
+  return [`it fits ${names.join(', ')}${more > 0 ? ` and ${more} more` : ''} as well`];
+}
+
+const otherReceipts = (count: number): string[] =>
+  count === 0 ? [] : [count === 1 ? 'another receipt fits too' : `${count} other receipts fit too`];
