@@ -10,7 +10,7 @@ const head = text.shipments.column;
 
 /** Shipments as a table or as cards. */
 export const shipmentColumns: Column<ShipmentRow>[] = [
-  { key: 'reference', head: head.reference, cell: (row) => row.reference, cardRole: 'title' },
+  { key: 'reference', head: head.reference, cell: (row) => row.reference, cardRole: 'title', whole: true },
   {
     key: 'contents',
     head: head.contents,
@@ -20,11 +20,18 @@ export const shipmentColumns: Column<ShipmentRow>[] = [
   { key: 'from', head: head.from, cell: (row) => row.from.site },
   { key: 'to', head: head.to, cell: (row) => row.to.site },
   { key: 'load', head: head.load, cell: loadOf },
-  { key: 'leftOn', head: head.leftOn, cell: (row) => formatDay(row.leftOn, 'short'), sortable: true },
+  {
+    key: 'leftOn',
+    head: head.leftOn,
+    cell: (row) => formatDay(row.leftOn, 'short'),
+    sortable: true,
+    whole: true,
+  },
   {
     key: 'expectedOn',
     head: head.expectedOn,
     cell: (row) => formatDay(row.expectedOn, 'short'),
+    whole: true,
     sortable: true,
   },
   { key: 'state', head: head.state, cell: (row) => <Tag {...stateOf(row)} />, cardRole: 'tag' },

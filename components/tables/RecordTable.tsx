@@ -20,11 +20,12 @@ export function RecordTable<Row>({ label, columns, rows, rowKey, rowHref, state 
       label={label}
       rows={rows}
       rowKey={rowKey}
-      columns={columns.map(({ key, head, cell, align, width, sortable }) => ({
+      columns={columns.map(({ key, head, cell, align, width, whole, sortable }) => ({
         key,
         head,
         ...(align === undefined ? {} : { align }),
         ...(width === undefined ? {} : { width }),
+        ...(whole ? { whole } : {}),
         ...(sortable && state
           ? {
               sorted: directionOf(state.sort, key),

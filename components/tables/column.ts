@@ -9,6 +9,8 @@ export type Column<Row> = {
   align?: 'start' | 'end';
   sortable?: boolean;
   width?: number | `${number}%`;
+  /** A reference, a day: never broken over two lines. */
+  whole?: boolean;
   /**
    * Where it goes on a card: "title" names the record and opens it, "aside" stands at the right of the title, "tag"
    * below it, "line" is a line of head and value, "hidden" is left out. "line" unless said.

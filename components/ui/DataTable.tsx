@@ -7,6 +7,7 @@ export type DataColumn<Row> = {
   cell: (row: Row) => ReactNode;
   align?: 'start' | 'end';
   width?: number | `${number}%`;
+  whole?: boolean;
   sorted?: 'ascending' | 'descending' | undefined;
   onSort?: () => void;
 };
@@ -35,7 +36,7 @@ export function DataTable<Row>({ label, columns, rows, rowKey }: Props<Row>) {
           {rows.map((row) => (
             <tr key={rowKey(row)}>
               {columns.map((column) => (
-                <td key={column.key} className={column.align === 'end' ? 'tk-end' : undefined}>
+                <td key={column.key} className={classOf(column)}>
                   {column.cell(row)}
                 </td>
               ))}
@@ -45,6 +46,11 @@ export function DataTable<Row>({ label, columns, rows, rowKey }: Props<Row>) {
       </table>
     </div>
   );
+}
+
+function classOf<Row>({ align, whole }: DataColumn<Row>): string | undefined {
+  const names = [...(align === 'end' ? ['tk-end'] : []), ...(whole ? ['tk-whole'] : [])];
+  return names.length > 0 ? names.join(' ') : undefined;
 }
 
 function Head<Row>({ column }: { column: DataColumn<Row> }) {
