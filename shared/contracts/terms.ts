@@ -1,14 +1,14 @@
 import { z } from 'zod';
 import { day } from '../domain/calendar';
 import { currencyCode } from '../domain/currencies';
-import { compare, nonNegativeDecimal } from '../domain/money';
+import { compare, decimalString } from '../domain/money';
 import { code, id } from './fields';
 import { listQuery, pageOf } from './list';
 import { operation } from './operation';
 
 /** An amount or fee below 10^12 with at most so many decimals; whole minor units are checked by the currency. */
 const upTo = (decimals: number, message: string) =>
-  nonNegativeDecimal.refine((value) => new RegExp(`^\\d{1,12}(\\.\\d{1,${decimals}})?$`).test(value), {
+  decimalString.refine((value) => new RegExp(`^\\d{1,12}(\\.\\d{1,${decimals}})?$`).test(value), {
     error: message,
   });
 const amount = upTo(4, 'An amount like 4.50, without more decimals than the currency has');

@@ -84,17 +84,21 @@ describe('making the drafts of a month', () => {
 
   it('closes months in their order', async () => {
     product.setClock('2026-05-02T09:00:00.000Z');
+    scene.finance = await product.as(scene.mikkel);
     const early = await scene.finance.post('/months/2026-04/close', { reason: '' });
     expect(early.body).toMatchObject({ code: 'earlier month open', data: { month: '2026-03' } });
   });
 
   it('refuses an ordinary posting into the closed month', async () => {
-    const late = scene.issue(partners[0]!, '2026-02-20', [{ typeCode: scene.tote.code, units: 1 }]);
+    const [first] = partners;
+    if (!first) throw new Error('no partner');
+    const late = scene.issue(first, '2026-02-20', [{ typeCode: scene.tote.code, units: 1 }]);
     await expect(late).rejects.toMatchObject({ code: 'month closed' });
   });
 
   it('lets neither coordinator nor partner close', async () => {
+    product.setClock('2026-03-20T09:00:00.000Z');
     expect((await scene.coordinator.post('/months/2026-03/close', { reason: '' })).status).toBe(403);
-    expect((await partners[0]!.caller.get('/months')).status).toBe(403);
+    expect((await partners[0]?.caller.get('/months'))?.status).toBe(403);
   });
 });
