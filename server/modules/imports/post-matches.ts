@@ -16,6 +16,7 @@ export async function postMatches(run: Run): Promise<void> {
     .from(receiptMatches)
     .where(and(eq(receiptMatches.importId, run.importId), eq(receiptMatches.state, 'planned')))
     .orderBy(asc(receiptMatches.groupId));
+  await run.left(planned.length);
   let steps = 0;
   for (const { groupId } of planned) {
     await postOne(run, groupId);

@@ -3,6 +3,7 @@ import type { Reader } from '@/db/client';
 import { importDocuments, importRows } from '@/db/schema/work';
 import type { ImportCells, ImportFileRow, RowProblem } from '@/shared/contracts/imports';
 import type { ImportDocument } from '@/shared/contracts/import-results';
+import { cursorNumber } from '../../http/page';
 import type { KeptProblem } from './import-marks';
 
 type Page<Row> = { rows: Row[]; next: string | null };
@@ -16,7 +17,7 @@ type RowsAsked = {
 /** Rows of a file, the bad ones first; the key is "bad row". */
 export async function pageOfRows(db: Reader, asked: RowsAsked): Promise<Page<ImportFileRow>> {
   const { importId, after, limit, only } = asked;
-  const [bad = 0, rowNo = 0] = (after ?? '').split(' ').map(Number);
+  const [bad = 0, rowNo = 0] = after === undefined ? [] : after.split(' ').map(cursorNumber);
   const rows = await db
     .select()
     .from(importRows)
@@ -61,7 +62,7 @@ export async function pageOfShipments(db: Reader, asked: DocumentsAsked): Promis
         eq(importDocuments.importId, importId),
         eq(importDocuments.side, 'shipment'),
         outcome === undefined ? undefined : eq(importDocuments.outcome, outcome),
-        after === undefined ? undefined : gt(importDocuments.rowNo, Number(after)),
+        after === undefined ? undefined : gt(importDocuments.rowNo, cursorNumber(after)),
       ),
     )
     .orderBy(asc(importDocuments.rowNo))

@@ -18,6 +18,8 @@ export type Run = {
   personId: string | null;
   /** Tells that so many more steps are done. */
   step: (steps: number) => Promise<void>;
+  /** Tells that only so many steps are left. */
+  left: (steps: number) => Promise<void>;
 };
 
 const payload = z.object({ importId: z.uuid() });
@@ -52,17 +54,19 @@ async function postAll(deps: Deps, { held, progress }: { held: Import; progress:
     importId: held.id,
     personId: held.confirmedBy,
     step: async (steps) => {
+      if (steps === 0) return;
       done = Math.min(total, done + steps);
       await progress(done, total);
     },
+    left: (steps) => run.step(total - steps - done),
   };
   if (held.phase === 'read') {
     await postShipments(run, documents);
     await storeReceipts(run, documents);
     await planMatches(run);
   }
-  await run.step(1);
   await postMatches(run);
+  await run.left(0);
 }
 
 async function readHeld(deps: Deps, importId: string): Promise<Import> {

@@ -1,5 +1,6 @@
 import type { Response } from 'supertest';
 import { aProduct, type Product } from '../../support/app';
+import { asOwner } from '../../support/database';
 import type { Caller } from '../../support/caller';
 import { csvOf, type MonthRow } from '../../support/month-file';
 
@@ -71,4 +72,35 @@ export const aReceipt = (given: Partial<MonthRow> = {}): MonthRow => ({
 export async function rowsIn({ deps }: Product, table: string): Promise<number> {
   const [rows] = await deps.pool.query(`SELECT COUNT(*) AS n FROM ${table}`);
   return Number((rows as { n: number }[])[0]?.n);
+}
+
+const moved = [
+  'settlements',
+  'differences',
+  'partner_events',
+  'daily_nets',
+  'balances',
+  'ledger_lines',
+  'ledger_entries',
+  'receipt_matches',
+  'receipt_lines',
+  'receipts',
+  'import_documents',
+  'import_rows',
+  'imports',
+  'count_lines',
+  'counts',
+  'shipment_lines',
+  'shipments',
+  'jobs',
+  'months',
+];
+
+/** Takes all movements out of a test's book, which only the owner of its tables can. */
+export async function emptyBook({ database }: Product): Promise<void> {
+  await asOwner(database.name, async (owner) => {
+    await owner.query('SET foreign_key_checks = 0');
+    for (const table of moved) await owner.query(`TRUNCATE TABLE ${table}`);
+    await owner.query("DELETE FROM accounts WHERE kind IN ('site', 'transit')");
+  });
 }

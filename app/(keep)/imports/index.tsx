@@ -1,0 +1,5 @@
+import { ImportsScreen } from '@/components/imports/ImportsScreen';
+
+export default function ImportsRoute() {
+  return <ImportsScreen />;
+}

@@ -1,0 +1,5 @@
+import { NewImportScreen } from '@/components/imports/NewImportScreen';
+
+export default function NewImportRoute() {
+  return <NewImportScreen />;
+}
