@@ -29,9 +29,9 @@ export function reconcile(raw: ReconciliationInput): Reconciliation {
     asOf: dayNumber(input.asOf),
     windowDays: input.windowDays,
   });
-  const candidates = settleByReference(desk);
-  candidates.push(...settleByLoad(desk, candidates));
-  return outcomeOf(desk, suggest(desk, candidates), {
+  const named = settleByReference(desk);
+  const unnamed = settleByLoad(desk, named);
+  return outcomeOf(desk, suggest(desk, [...named, ...unnamed]), {
     asOf: dayNumber(input.asOf),
     overdueAfterDays: input.overdueAfterDays,
   });

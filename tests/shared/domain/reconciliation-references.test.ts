@@ -101,6 +101,15 @@ describe('combined delivery', () => {
     expect(outcomeFor(shipments, [{ ...receipt, lines: totes(96) }]).matches).toEqual([]);
   });
 
+  test('two receipts that read alike as both, days apart, are rivals; a day apart they are one', () => {
+    const mistyped = (id: string, date: string) =>
+      aReceipt({ id, date, ref: 'EM-104301 + EM-14302', lines: totes(144) });
+    const apart = [mistyped('R1', '2026-03-12'), mistyped('R2', '2026-03-15')];
+    expect(outcomeFor(shipments, apart)).toMatchObject({ matches: [], unannounced: ['R1', 'R2'] });
+    const together = [mistyped('R1', '2026-03-12'), mistyped('R2', '2026-03-13')];
+    expect(outcomeFor(shipments, together).duplicates).toEqual([{ receipt: 'R2', of: 'R1' }]);
+  });
+
   test('entered twice, the later is the duplicate', () => {
     const receipt = aReceipt({ id: 'R1', ref: 'EM-104301 + EM-104302', lines: totes(144) });
     const outcome = outcomeFor(shipments, [{ ...receipt, id: 'R2', date: '2026-03-13' }, receipt]);

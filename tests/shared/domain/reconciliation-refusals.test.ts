@@ -15,7 +15,7 @@ const withShipment = (given: object) =>
   aMonth({ shipments: [aShipment({ id: 'S1' }), { ...aShipment({ id: 'S2', ref: 'EM-1' }), ...given }] });
 const withReceipt = (given: object) => aMonth({ receipts: [{ ...aReceipt({ id: 'R7' }), ...given }] });
 
-test.each([
+const refused: [what: string, input: unknown, document: string, reason: RegExp][] = [
   ['a fraction of a unit', withShipment({ lines: totes(1.5) }), 'shipment S2', /whole/],
   ['no unit', withShipment({ lines: totes(0) }), 'shipment S2', /at least 1/],
   ['fewer than none', withReceipt({ lines: totes(-3) }), 'receipt R7', /at least 1/],
@@ -37,7 +37,9 @@ test.each([
   ['half a day', aMonth({ overdueAfterDays: 0.5 }), 'overdueAfterDays', /whole/],
   ['no receipts at all', { ...aMonth({}), receipts: undefined }, 'receipts', /./],
   ['nothing', null, 'input', /./],
-])('%s is refused, and the document named', (_, input, document, reason) => {
+];
+
+test.each(refused)('%s is refused, and the document named', (...[, input, document, reason]) => {
   const refusal = refusalOf(input);
   expect(refusal.document).toBe(document);
   expect(refusal.reason).toMatch(reason);
