@@ -11,12 +11,15 @@ import { Text } from '../ui/Text';
 const words = text.shipments;
 type Count = ShipmentDetail['counts'][number];
 
-/** Who counted and when, with note and photos. */
+/** Who sent it, who counted and when, with notes and photos. */
 export function CountsCard({ shipment }: { shipment: ShipmentDetail }) {
-  if (shipment.counts.length === 0) return null;
+  const { sentBy, note, counts } = shipment;
+  if (counts.length === 0 && sentBy === null && note === '') return null;
   return (
     <Card title={words.countsHead}>
-      {shipment.counts.map((count) => (
+      {sentBy === null ? null : <Text>{words.sentBy(sentBy)}</Text>}
+      {note === '' ? null : <Text variant="soft">{note}</Text>}
+      {counts.map((count) => (
         <OneCount key={count.id} count={count} timeZone={shipment.timeZone} />
       ))}
     </Card>

@@ -1,5 +1,5 @@
 import type { AnswerOf } from '@/shared/contracts/operation';
-import { listShipmentChoices, sendShipment } from '@/shared/contracts/shipments';
+import { type listShipmentChoices, sendShipment } from '@/shared/contracts/shipments';
 import { text } from '@/shared/text/catalogue';
 import { usePost } from '../data/use-operation';
 import { DateField, SelectField } from '../forms/choice-fields';

@@ -4,12 +4,10 @@ import { formatDay } from '@/shared/text/format';
 import { Problem } from '../data/Problem';
 import { useRead } from '../data/use-operation';
 import { useSignedIn } from '../data/use-session';
-import { Card } from '../ui/Card';
 import { ButtonLink } from '../ui/Link';
 import { Page } from '../ui/Page';
 import { Skeleton } from '../ui/Skeleton';
 import { Tag } from '../ui/Tag';
-import { Text } from '../ui/Text';
 import { CountsCard } from './CountsCard';
 import { EntriesCard } from './EntriesCard';
 import { LinesCard } from './LinesCard';
@@ -47,7 +45,6 @@ export function ShipmentScreen({ shipment: id }: { shipment: string }) {
       action={<MainAction shipment={shipment} />}
     >
       <LinesCard shipment={shipment} />
-      <Note shipment={shipment} />
       <CountsCard shipment={shipment} />
       <SettlementsCard shipment={shipment} />
       <EntriesCard shipment={shipment} />
@@ -66,18 +63,6 @@ function MainAction({ shipment }: { shipment: ShipmentDetail }) {
   if (open && may('settle differences'))
     return <ButtonLink href={`/differences/${open.id}`} label={words.settle} />;
   if (shipment.state === 'counted' && may('open disputes'))
-    return (
-      <ButtonLink kind="secondary" href={`/disputes/new?shipment=${shipment.id}`} label={words.dispute} />
-    );
+    return <ButtonLink kind="secondary" href={`/shipments/${shipment.id}/dispute`} label={words.dispute} />;
   return null;
-}
-
-function Note({ shipment }: { shipment: ShipmentDetail }) {
-  if (shipment.note === '' && shipment.sentBy === null) return null;
-  return (
-    <Card>
-      {shipment.sentBy === null ? null : <Text variant="soft">{words.sentBy(shipment.sentBy)}</Text>}
-      {shipment.note === '' ? null : <Text>{shipment.note}</Text>}
-    </Card>
-  );
 }

@@ -24,6 +24,7 @@ export const shipmentColumns: Column<ShipmentRow>[] = [
     key: 'leftOn',
     head: head.leftOn,
     cell: (row) => formatDay(row.leftOn, 'short'),
+    width: 84,
     sortable: true,
     whole: true,
   },
@@ -31,8 +32,9 @@ export const shipmentColumns: Column<ShipmentRow>[] = [
     key: 'expectedOn',
     head: head.expectedOn,
     cell: (row) => formatDay(row.expectedOn, 'short'),
+    width: 100,
     whole: true,
     sortable: true,
   },
-  { key: 'state', head: head.state, cell: (row) => <Tag {...stateOf(row)} />, cardRole: 'tag' },
+  { key: 'state', head: head.state, cell: (row) => <Tag {...stateOf(row)} />, cardRole: 'tag', width: 216 },
 ];

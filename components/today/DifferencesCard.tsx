@@ -1,26 +1,34 @@
 import type { Today } from '@/shared/contracts/today';
 import { text } from '@/shared/text/catalogue';
 import { formatDay } from '@/shared/text/format';
+import { Box } from '../ui/Box';
 import { Card } from '../ui/Card';
 import { Figure } from '../ui/Figure';
 import { Link } from '../ui/Link';
 import { Sheet, type SheetColumn } from '../ui/Sheet';
 import { Tag } from '../ui/Tag';
+import { Text } from '../ui/Text';
 import { WorkCard } from './WorkCard';
 
 const words = text.today;
 type Row = NonNullable<Today['differences']>['rows'][number];
 
-const saidOf = ({ openUnits, typeName }: Pick<Row, 'openUnits' | 'typeName'>) => ({
+const saidOf = ({ openUnits }: Pick<Row, 'openUnits'>) => ({
   tone: 'differs' as const,
-  label: openUnits < 0 ? words.fewer(-openUnits, typeName) : words.more(openUnits, typeName),
+  label: openUnits < 0 ? words.fewer(-openUnits) : words.more(openUnits),
 });
 
 const columns: readonly SheetColumn<Row>[] = [
-  { key: 'shipment', head: words.column.shipment, cell: (row) => row.reference },
+  { key: 'shipment', head: words.column.shipment, cell: (row) => row.reference, width: 116 },
   { key: 'between', head: words.column.between, cell: (row) => words.between(row.from, row.to) },
-  { key: 'what', head: words.column.what, cell: (row) => <Tag {...saidOf(row)} /> },
-  { key: 'openFor', head: words.column.openFor, align: 'end', cell: (row) => words.openFor(row.openDays) },
+  { key: 'what', head: words.column.what, cell: (row) => <What row={row} /> },
+  {
+    key: 'openFor',
+    head: words.column.openFor,
+    align: 'end',
+    cell: (row) => words.openFor(row.openDays),
+    width: 84,
+  },
   {
     key: 'atStake',
     head: words.column.atStake,
@@ -29,13 +37,22 @@ const columns: readonly SheetColumn<Row>[] = [
   },
   {
     key: 'action',
-    head: '',
+    head: words.column.next,
     align: 'end',
     cell: (row) => (
       <Link href={`/differences/${row.id}`} label={words.settle} name={words.settleOf(row.reference)} />
     ),
   },
 ];
+
+function What({ row }: { row: Row }) {
+  return (
+    <Box gap="xs">
+      <Tag {...saidOf(row)} />
+      <Text variant="small">{row.typeName}</Text>
+    </Box>
+  );
+}
 
 /** The coordinator's: the oldest first, with what is at stake. */
 export function DifferencesCard({ today }: { today: Today }) {
@@ -69,7 +86,7 @@ export function OwnDifferencesCard({ today }: { today: Today }) {
       rows={rows.map((row) => ({
         key: row.id,
         tag: saidOf(row),
-        lines: [words.countedOn(row.reference, formatDay(row.openedOn, 'date'))],
+        lines: [words.countedOn(row.reference, row.typeName, formatDay(row.openedOn, 'date'))],
         action: {
           href: `/shipments/${row.shipmentId}`,
           label: words.open,

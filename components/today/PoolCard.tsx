@@ -48,8 +48,12 @@ function noteOf(types: readonly PoolOfType[], total: number): string {
   const sized = types.filter((each) => each.approved !== null);
   const approved = sized.reduce((units, each) => units + (each.approved ?? 0), 0);
   const under = sized.filter((each) => each.total < (each.approved ?? 0)).length;
-  if (sized.length === 0) return words.inPool(total);
-  return [words.inPool(total), words.approved(approved), words.under(under, sized.length)].join(' · ');
+  const isWhole = sized.length === types.length;
+  return [
+    words.inPool(total),
+    ...(isWhole && sized.length > 0 ? [words.approved(approved)] : []),
+    ...(sized.length > 0 ? [words.under(under, sized.length)] : []),
+  ].join(' · ');
 }
 
 /** One amount per currency: amounts of different currencies are never added. */

@@ -96,12 +96,14 @@ function Worklist({ today, type, leadsWithPool }: WorklistProps) {
       <AdministrationCard today={today} />
       <MonthEndCard today={today} />
       <LevelsCard today={today} />
+      {today.differences ? (
+        <Box row wrap gap="l" align="start">
+          <DifferencesCard today={today} />
+          <RunningCard today={today} />
+        </Box>
+      ) : null}
       <DeliveriesCard today={today} />
       <HoldingCard today={today} />
-      <Box row wrap gap="l" align="start">
-        <DifferencesCard today={today} />
-        <RunningCard today={today} />
-      </Box>
       <OwnDifferencesCard today={today} />
       <DisputesCard today={today} />
       <AwaitedCard today={today} />

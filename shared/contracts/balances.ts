@@ -124,6 +124,8 @@ export const adjustStock = operation({
   answer: z.object({ entryId: z.number().int(), units }),
 });
 
+export const reversalForm = z.object({ reason: prose(500) });
+
 export const reverseEntry = operation({
   name: 'reverseEntry',
   resource: 'balances',
@@ -131,7 +133,7 @@ export const reverseEntry = operation({
   path: '/entries/:entry/reversals',
   summary: 'Take back an adjustment by an entry that names it, on the same day',
   params: z.object({ entry: z.coerce.number().int().positive().max(Number.MAX_SAFE_INTEGER) }),
-  body: z.object({ reason: prose(500) }),
+  body: reversalForm,
   answer: z.object({ entryId: z.number().int(), correctsEntryId: z.number().int() }),
 });
 

@@ -58,7 +58,7 @@ export const shipments = {
   settledDifference: (units: number) =>
     `${formatUnits(Math.abs(units))} ${units < 0 ? 'fewer' : 'more'}, settled`,
   note: 'Note',
-  countsHead: 'Counts',
+  countsHead: 'Who sent and counted',
   laterCount: (sequence: number) => `Count ${formatUnits(sequence)}, turned up later`,
   countedBy: (name: string, when: string) => `Counted by ${name}, ${when}`,
   countedByImport: (when: string) => `Counted, taken from a file, ${when}`,

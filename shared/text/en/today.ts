@@ -42,9 +42,9 @@ export const today = {
     'Days of packing that what is at the site will last, by the parts kept for it. A bar is full at ten days.',
   sendEmpties: 'Send empties',
 
-  fewer: (units: number, type: string) => `${formatUnits(units)} fewer: ${type}`,
-  more: (units: number, type: string) => `${formatUnits(units)} more: ${type}`,
-  countedOn: (reference: string, day: string) => `${reference}, counted ${day}`,
+  fewer: (units: number) => `${formatUnits(units)} fewer`,
+  more: (units: number) => `${formatUnits(units)} more`,
+  countedOn: (reference: string, type: string, day: string) => `${reference}, ${type}, counted ${day}`,
 
   type: 'Container type',
   allTypes: 'All container types',
@@ -72,6 +72,7 @@ export const today = {
     what: 'What differs',
     openFor: 'Open for',
     atStake: 'At stake',
+    next: 'Next step',
   },
   between: (from: string, to: string) => `${from} → ${to}`,
   openFor: days,

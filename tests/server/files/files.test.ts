@@ -25,12 +25,9 @@ const pdf = Buffer.from('%PDF-1.4\n1 0 obj<</Type/Catalog>>endobj\ntrailer<</Roo
 const svg = Buffer.from('<svg xmlns="http://www.w3.org/2000/svg"><script>alert(1)</script></svg>');
 const html = Buffer.from('<!doctype html><html><script>alert(1)</script></html>');
 
-const send = (
-  caller: Caller,
-  bytes: Buffer,
-  named: { filename: string; contentType: string },
-  key?: string,
-) => caller.form('/files', key ? { key } : {}).attach('file', bytes, named);
+type Named = { filename: string; contentType: string; key?: string };
+const send = (caller: Caller, bytes: Buffer, { key, ...named }: Named) =>
+  caller.form('/files', key ? { key } : {}).attach('file', bytes, named);
 
 describe('sending a file', () => {
   it.each([
@@ -67,11 +64,11 @@ describe('sending a file', () => {
 
   it('twice under one key keeps one file; other content under that key is refused', async () => {
     const key = 'photo-one-key';
-    const named = { filename: 'once.png', contentType: 'image/png' };
-    const first = await send(lane.clerk, png, named, key);
-    const again = await send(lane.clerk, png, named, key);
+    const named = { filename: 'once.png', contentType: 'image/png', key };
+    const first = await send(lane.clerk, png, named);
+    const again = await send(lane.clerk, png, named);
     expect(again.body).toEqual(first.body);
-    const other = await send(lane.clerk, Buffer.concat([png, Buffer.from([0])]), named, key);
+    const other = await send(lane.clerk, Buffer.concat([png, Buffer.from([0])]), named);
     expect([other.status, other.body.code]).toEqual([422, 'key used otherwise']);
   });
 

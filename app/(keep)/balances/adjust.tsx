@@ -1,0 +1,5 @@
+import { AdjustScreen } from '@/components/balances/AdjustScreen';
+
+export default function AdjustRoute() {
+  return <AdjustScreen />;
+}

@@ -1,0 +1,5 @@
+import { BalancesScreen } from '@/components/balances/BalancesScreen';
+
+export default function BalancesRoute() {
+  return <BalancesScreen />;
+}
