@@ -62,6 +62,8 @@ async function main(rows: number): Promise<void> {
     check(`posting ${rows} rows`, await measured(() => product.runJobs()), mostSeconds.posting);
     const { body } = await coordinator.get(`/imports/${id}`);
     console.log(JSON.stringify(body.numbers));
+    const { user, system } = process.cpuUsage();
+    console.log(`processor time of this process: ${((user + system) / 1e6).toFixed(1)} s`);
     console.log(`memory: ${(process.memoryUsage().rss / 1e6).toFixed(0)} MB resident`);
     if (body.state !== 'done') failures.push(`the import is ${body.state}`);
     if (failures.length > 0) throw new Error(failures.join('; '));

@@ -12,13 +12,13 @@ export class Caller {
     public token: string,
   ) {}
 
-  static async stranger(app: Express): Promise<Caller> {
+  static async stranger(app: Express | string): Promise<Caller> {
     const agent = request.agent(app);
     const response = await agent.get('/api/session');
     return new Caller(agent, String(response.body.csrfToken));
   }
 
-  static async signedIn(app: Express, email: string, password = testPassword): Promise<Caller> {
+  static async signedIn(app: Express | string, email: string, password = testPassword): Promise<Caller> {
     const caller = await Caller.stranger(app);
     const response = await caller.post('/session', { email, password });
     if (response.status !== 200)

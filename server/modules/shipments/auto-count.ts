@@ -12,7 +12,7 @@ import { queueMail } from '../../mail/outbox';
 import { peopleWhoMay } from '../partners/people-who-may';
 import { countShipment } from './count-shipment';
 import { afterAutomaticMail, beforeAutomaticMail } from './letters';
-import { selectShipments, type SelectedShipment, toCompany } from './shipment-rows';
+import { selectShipments, type SelectedShipment, toCompany, withEnds } from './shipment-rows';
 
 const noticeJob = 'notice before automatic count';
 const countJob = 'automatic count';
@@ -50,7 +50,7 @@ async function findDue(deps: Deps): Promise<void> {
       ),
     )
     .orderBy(asc(shipments.expectedOn), asc(shipments.id));
-  for (const row of due) {
+  for (const row of withEnds(due)) {
     const today = dayInZone(now, row.toSite.timeZone);
     if (compareDays(today, lastDayOf(row)) < 0) continue;
     const { id } = row.shipment;
@@ -74,8 +74,8 @@ async function wasToldBefore(
 }
 
 async function stillUncounted(tx: Transaction, id: string): Promise<SelectedShipment | undefined> {
-  const [row] = await selectShipments(tx).where(and(eq(shipments.id, id), eq(shipments.state, 'on the way')));
-  return row;
+  const found = await selectShipments(tx).where(and(eq(shipments.id, id), eq(shipments.state, 'on the way')));
+  return withEnds(found)[0];
 }
 
 async function giveNotice(tx: Transaction, { deps, id }: OneShipment): Promise<void> {

@@ -6,7 +6,7 @@ import type { AnswerOf, QueryOf } from '@/shared/contracts/operation';
 import type { listShipments as contract } from '@/shared/contracts/shipments';
 import { Problem } from '@/shared/problems/problems';
 import { type Person, scopeOf } from '../../http/person';
-import { fromCompany, selectShipments, shipmentRows, toCompany } from './shipment-rows';
+import { fromCompany, selectShipments, shipmentRows, toCompany, withEnds } from './shipment-rows';
 
 type Query = QueryOf<typeof contract>;
 type Asked = { query: Query; person: Person; today: string };
@@ -22,7 +22,7 @@ export async function listShipments(db: Reader, asked: Asked): Promise<AnswerOf<
       order.down ? desc(shipments.id) : asc(shipments.id),
     )
     .limit(query.limit + 1);
-  const page = selected.slice(0, query.limit);
+  const page = withEnds(selected.slice(0, query.limit));
   const last = page.at(-1)?.shipment;
   return {
     rows: await shipmentRows(db, { selected: page, person }),

@@ -10,7 +10,7 @@ import type { ShipmentDetail } from '@/shared/contracts/shipments';
 import { Problem } from '@/shared/problems/problems';
 import { type Person, scopeOf } from '../../http/person';
 import { entriesOfShipment } from '../ledger/entries-of-shipment';
-import { selectShipments, shipmentRows } from './shipment-rows';
+import { selectShipments, shipmentRows, withEnds } from './shipment-rows';
 
 /** One shipment with everything behind it; of another company: as if it did not exist. */
 export async function readShipment(
@@ -18,12 +18,13 @@ export async function readShipment(
   { id, person }: { id: string; person: Person },
 ): Promise<ShipmentDetail> {
   const scope = scopeOf(person);
-  const selected = await selectShipments(db).where(
+  const found = await selectShipments(db).where(
     and(
       eq(shipments.id, id),
       scope ? or(eq(shipments.fromCompanyId, scope), eq(shipments.toCompanyId, scope)) : undefined,
     ),
   );
+  const selected = withEnds(found);
   const [row] = await shipmentRows(db, { selected, person });
   const shipment = selected[0]?.shipment;
   if (!row || !shipment) throw new Problem('not found');

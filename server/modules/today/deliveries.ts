@@ -4,7 +4,7 @@ import { shipments } from '@/db/schema/shipments';
 import type { Today } from '@/shared/contracts/today';
 import { may, type Person } from '../../http/person';
 import { overdueBy } from '../shipments/list-shipments';
-import { fromCompany, selectShipments, shipmentRows, toCompany } from '../shipments/shipment-rows';
+import { fromCompany, selectShipments, shipmentRows, toCompany, withEnds } from '../shipments/shipment-rows';
 
 const shown = 6;
 
@@ -40,5 +40,5 @@ async function worklist(
     .innerJoin(fromCompany, eq(fromCompany.id, shipments.fromCompanyId))
     .innerJoin(toCompany, eq(toCompany.id, shipments.toCompanyId))
     .where(where);
-  return { total: all?.total ?? 0, rows: await shipmentRows(db, { selected, person }) };
+  return { total: all?.total ?? 0, rows: await shipmentRows(db, { selected: withEnds(selected), person }) };
 }
