@@ -30,7 +30,7 @@ export type Reader = Database | Transaction;
 
 /** Options every connection has: UTC, dates as text, large numbers as text rather than rounded. */
 export function poolOf(url: string, connections = 16): Pool {
-  return createPool({
+  const pool = createPool({
     uri: url,
     connectionLimit: connections,
     maxIdle: connections,
@@ -43,6 +43,12 @@ export function poolOf(url: string, connections = 16): Pool {
     charset: 'utf8mb4',
     enableKeepAlive: true,
   });
+  // Whoever waits for a row or a table longer than this is told so, instead of holding a connection.
+  pool.pool.on('connection', (connection) => {
+    // A connection that breaks here fails the query it was opened for.
+    connection.query('SET SESSION innodb_lock_wait_timeout = 5, lock_wait_timeout = 10', () => undefined);
+  });
+  return pool;
 }
 
 export function databaseOn(pool: Pool): Database {

@@ -4,6 +4,8 @@ import type { Database, Transaction } from './client';
 /** Record changed since read, lock wait timeout, deadlock: the whole transaction may be tried again. */
 const retryable = new Set([1020, 1205, 1213]);
 const tries = 8;
+/** No repeat begins after so many milliseconds: whoever asked is better told than kept. */
+const repeatFor = 8000;
 
 /** The MariaDB error number behind an error of drizzle or the driver, if any. */
 export function databaseErrorNumber(error: unknown): number | undefined {
@@ -20,12 +22,14 @@ export async function inTransaction<Result>(
   db: Database,
   work: (tx: Transaction) => Promise<Result>,
 ): Promise<Result> {
+  const until = Date.now() + repeatFor;
   for (let attempt = 1; ; attempt += 1) {
     try {
       return await db.transaction(work, { isolationLevel: 'read committed' });
     } catch (error) {
       const number = databaseErrorNumber(error);
-      if (attempt >= tries || number === undefined || !retryable.has(number)) throw error;
+      const again = attempt < tries && Date.now() < until;
+      if (!again || number === undefined || !retryable.has(number)) throw error;
       await pause(5 * 2 ** attempt * (0.5 + Math.random()));
     }
   }

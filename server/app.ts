@@ -8,10 +8,12 @@ import type { Deps } from './deps';
 import { answerProblem } from './http/answer-problem';
 import { clientFiles } from './http/client-files';
 import { securityHeaders } from './http/headers';
+import { loggedError } from './http/logger';
 import { mount } from './http/mount';
 import { openApiOf } from './http/openapi';
 import { rateLimits } from './http/rate-limit';
 import { currentPerson, sessions } from './http/session';
+import { timeBudget } from './http/time-budget';
 import { csrfToken, fromOwnPages } from './http/trust';
 import { healthRoutes } from './modules/health/router';
 import { allRoutes } from './routes';
@@ -29,6 +31,7 @@ export function createApp(deps: Deps): Express {
       genReqId: () => randomUUID(),
       autoLogging: { ignore: (request) => !request.url?.startsWith('/api/') },
       serializers: {
+        err: loggedError,
         req: (request: { id: string; method: string; url: string }) => ({
           id: request.id,
           method: request.method,
@@ -59,6 +62,7 @@ function api(deps: Deps): express.Router {
     response.setHeader('cache-control', 'no-store');
     next();
   });
+  router.use(timeBudget(deps.config.REQUEST_SECONDS));
   router.get('/openapi.json', (_request, response) => {
     response.json(openApiOf(routes));
   });

@@ -14,6 +14,8 @@ const settings = z.object({
   SESSION_SECRET: z.string().min(32),
   SMTP_URL: z.url({ protocol: /^smtps?$/ }).optional(),
   MAIL_FROM: z.email().default('book@tarekeep.example'),
+  /** Seconds after which a request that still waits is answered 503. */
+  REQUEST_SECONDS: z.coerce.number().positive().max(120).default(20),
   FILES_DIR: z.string().min(1).default('.local/files'),
   CLIENT_DIR: z.string().min(1).default('dist'),
   TRUST_PROXY: flag.default(false),

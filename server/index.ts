@@ -1,10 +1,10 @@
 import { createServer } from 'node:http';
-import { pino } from 'pino';
 import { databaseOn, poolOf } from '@/db/client';
 import { createApp } from './app';
 import { type Config, readConfig } from './config';
 import type { Deps } from './deps';
 import { folderStore } from './files/file-store';
+import { loggerOf } from './http/logger';
 import { jobHandlers, scheduled } from './jobs/all-work';
 import { startWorker } from './jobs/worker';
 import { mailerOf } from './mail/send-waiting';
@@ -19,7 +19,7 @@ function configured(): Config {
 }
 
 const config = configured();
-const logger = pino({ level: config.LOG_LEVEL, redact: ['req.headers', 'res.headers'] });
+const logger = loggerOf(config.LOG_LEVEL);
 const pool = poolOf(config.DATABASE_URL, config.DATABASE_CONNECTIONS);
 const deps: Deps = {
   config,

@@ -1,6 +1,6 @@
 import type { ErrorRequestHandler, Request } from 'express';
 import { databaseErrorNumber } from '@/db/transaction';
-import { Problem, type ProblemAnswer } from '@/shared/problems/problems';
+import { Problem, type ProblemAnswer, type ProblemCode } from '@/shared/problems/problems';
 import type { Deps } from '../deps';
 import { instantOf } from '../deps';
 import { writeLog } from '../modules/log/write-log';
@@ -12,8 +12,7 @@ export function answerProblem(deps: Deps): ErrorRequestHandler {
   return async (error: unknown, request, response, _next) => {
     const problem = problemOf(error);
     if (problem.code === 'failed here') request.log.error({ err: error }, 'failed');
-    if (problem.code === 'not allowed' || problem.code === 'request not trusted')
-      await logRefusal(deps, { request, problem });
+    if (loggedRefusals.has(problem.code)) await logRefusal(deps, { request, problem });
     if (response.headersSent) {
       response.destroy();
       return;
@@ -32,6 +31,14 @@ export function answerProblem(deps: Deps): ErrorRequestHandler {
   };
 }
 
+/** Refusals that someone may want to look into afterwards. */
+const loggedRefusals: ReadonlySet<ProblemCode> = new Set([
+  'not allowed',
+  'request not trusted',
+  'too many tries',
+  'link not valid',
+]);
+
 function problemOf(error: unknown): Problem {
   if (error instanceof Problem) return error;
   if (isBodyError(error)) {
@@ -40,6 +47,7 @@ function problemOf(error: unknown): Problem {
       fields: [{ path: '', message: 'The body is not JSON that can be read' }],
     });
   }
+  if (isAddressError(error)) return new Problem('not found');
   if (isCsrf(error)) return new Problem('request not trusted');
   if (isAway(error)) return new Problem('database away');
   return new Problem('failed here');
@@ -53,6 +61,11 @@ function isBodyError(error: unknown): error is { type: string } {
     typeof error.type === 'string' &&
     'status' in error
   );
+}
+
+/** Express found a part of the address that is no text, such as "%E0%A4%A". */
+function isAddressError(error: unknown): boolean {
+  return error instanceof Error && error.name === 'URIError';
 }
 
 function isCsrf(error: unknown): boolean {
@@ -70,13 +83,16 @@ const awayCodes = new Set([
   'ENOENT',
 ]);
 
+/** Shutting down, disk full, table full, and conflicts that many repeats did not get past (lock wait, deadlock, changed). */
+const awayNumbers: ReadonlySet<number> = new Set([1053, 1021, 1114, 1205, 1213, 1020]);
+
 function isAway(error: unknown): boolean {
   if (typeof error !== 'object' || error === null) return false;
   if ('code' in error && typeof error.code === 'string' && awayCodes.has(error.code)) return true;
   if (error instanceof Error && /Queue limit reached|Pool is closed|closed state/.test(error.message))
     return true;
   const number = databaseErrorNumber(error);
-  if (number === 1053 || number === 1205 || number === 1021 || number === 1114) return true;
+  if (number !== undefined && awayNumbers.has(number)) return true;
   return 'cause' in error && isAway(error.cause);
 }
 

@@ -38,7 +38,7 @@ async function serve(route: Route, exchange: Exchange): Promise<void> {
       request,
       response,
     } as never);
-    if (!response.headersSent) response.json(checked(route, answer));
+    answered(response, checked(route, answer));
     return;
   }
   const person = request.person;
@@ -46,12 +46,30 @@ async function serve(route: Route, exchange: Exchange): Promise<void> {
   if (!may(person, route.ability)) throw new Problem('not allowed');
   if (route.kind === 'post') {
     const files = route.operation.sends === 'files' ? await readUpload(request, response) : [];
-    response.json(checked(route, await change(route, { ...exchange, at, person, files })));
+    answered(response, checked(route, await change(route, { ...exchange, at, person, files })));
     return;
   }
   const call = { ...asked(route, request), db: deps.db, person, deps, at } as never;
-  if (route.kind === 'file') await sendFile(response, await route.handle(call));
-  else response.json(checked(route, await route.handle(call)));
+  if (route.kind === 'file') await sendFile(response, await handedOut(route, { call, person, at, deps }));
+  else answered(response, checked(route, await route.handle(call)));
+}
+
+/** Unless the time for an answer ran out before. */
+function answered(response: Response, body: unknown): void {
+  if (!response.headersSent) response.json(body);
+}
+
+type HandingOut = { call: never; person: Person; at: Circumstances; deps: Deps };
+
+/** What leaves as a file is written in the log before its first byte. */
+async function handedOut(
+  route: Extract<Route, { kind: 'file' }>,
+  { call, person, at, deps }: HandingOut,
+): Promise<FileAnswer> {
+  const answer = await route.handle(call);
+  const subject = subjectOf(route, call, null);
+  await writeLog(deps.db, { at, person, action: route.operation.name, outcome: 'done', subject });
+  return answer;
 }
 
 type Change = Exchange & { at: Circumstances; person: Person; files: UploadedFile[] };
@@ -136,6 +154,7 @@ function subjectOf(route: Route, call: Asked, answer: unknown): { kind: string; 
 }
 
 async function sendFile(response: Response, answer: FileAnswer): Promise<void> {
+  if (response.headersSent) return;
   const how = answer.inline ? 'inline' : 'attachment';
   const plain = answer.name.replace(/[^\x20-\x7e]|["\\]/g, '_');
   response.setHeader('content-type', answer.mediaType);

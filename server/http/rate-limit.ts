@@ -37,12 +37,6 @@ function databaseOf(pool: Pool): string {
   return inner.config.connectionConfig.database;
 }
 
-/** Refuses when the key has used up its tries, without using one. */
-export async function refuseWhenSpent(limiter: RateLimiterMySQL, key: string): Promise<void> {
-  const held = await limiter.get(key);
-  if (held && held.consumedPoints >= limiter.points && held.msBeforeNext > 0) throw tooMany(held);
-}
-
 /** Uses one try of the key; refuses when there is none left. */
 export async function useTry(limiter: RateLimiterMySQL, key: string): Promise<void> {
   try {

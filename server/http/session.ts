@@ -16,6 +16,8 @@ export function sessions(deps: Deps): RequestHandler {
   const store = new Store(
     {
       clearExpired: false,
+      // How long a session lives is judged by its own instants, below; a write for every request would tell nothing.
+      disableTouch: true,
       createDatabaseTable: false,
       expiration: config.SESSION_MAX_HOURS * hour,
       schema: {

@@ -6,7 +6,7 @@ import { outbox } from '@/db/schema/work';
 import type { listLetters, listLog } from '@/shared/contracts/log';
 import type { QueryOf } from '@/shared/contracts/operation';
 import { Problem } from '@/shared/problems/problems';
-import { cursor, cutPage } from '../../http/page';
+import { cursor, cursorNumber, cutPage } from '../../http/page';
 import { likeText } from '../../http/search';
 
 /** The log, newest first. */
@@ -19,7 +19,7 @@ export async function logPage(db: Database, query: QueryOf<typeof listLog>) {
     .leftJoin(companies, eq(companies.id, log.companyId))
     .where(
       and(
-        after ? lt(log.id, Number(after[0])) : undefined,
+        after ? lt(log.id, cursorNumber(after[0])) : undefined,
         query.person ? eq(log.personId, query.person) : undefined,
         query.subject ? eq(log.subjectId, query.subject) : undefined,
         query.outcome ? eq(log.outcome, query.outcome) : undefined,

@@ -24,6 +24,6 @@ export async function writeLog(db: Reader, row: LogRow): Promise<void> {
     subjectId: row.subject?.id ?? null,
     detail: row.detail ?? null,
     requestId: row.at.requestId,
-    address: row.at.address,
+    address: row.at.address.slice(0, 60),
   });
 }

@@ -8,7 +8,7 @@ import { dayInZone } from '@/shared/domain/calendar';
 import { Problem } from '@/shared/problems/problems';
 import type { Deps } from '../../deps';
 import { readPerson } from '../../http/person';
-import { type Limits, refuseWhenSpent, useTry } from '../../http/rate-limit';
+import { type Limits, useTry } from '../../http/rate-limit';
 import { type Circumstances, open, type Route } from '../../http/route';
 import { csrfTokenOf } from '../../http/trust';
 import { queueMail } from '../../mail/outbox';
@@ -79,17 +79,17 @@ type Attempt = { email: string; password: string; db: Database; limits: Limits; 
 
 /** The same answer and the same work for an unknown address, a wrong password, and an account without one. */
 async function checkPassword({ email, password, db, limits, at }: Attempt) {
-  await refuseWhenSpent(limits.account, email);
-  await refuseWhenSpent(limits.address, at.address);
+  // A try is used before the password is looked at: a hundred at once are a hundred tries.
+  await useTry(limits.account, email);
+  await useTry(limits.address, at.address);
   const [row] = await db.select().from(people).where(eq(people.email, email));
   const fits = await passwordFits(row?.passwordHash ?? null, password);
   const person = row && fits ? await readPerson(db, row.id) : null;
   if (!person) {
-    await Promise.all([useTry(limits.account, email), useTry(limits.address, at.address)]);
     await writeLog(db, { at, person: null, action: 'signIn', outcome: 'refused' });
     throw new Problem('sign-in refused');
   }
-  await limits.account.delete(email);
+  await Promise.all([limits.account.delete(email), limits.address.reward(at.address)]);
   await db.update(people).set({ lastSignedInAt: at.now }).where(eq(people.id, person.id));
   return person;
 }
