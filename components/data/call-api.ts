@@ -29,21 +29,39 @@ export async function callApi<O extends Operation>(operation: O, call: Call<O> =
   return parsed.data as AnswerOf<O>;
 }
 
-/** Once more with a fresh token, and once more after a new sign-in. */
+/** Once more after a new sign-in. */
 async function sendTrusted<O extends Operation>(operation: O, call: Call<O>): Promise<Response> {
+  try {
+    return await sendWithToken(operation, call);
+  } catch (error) {
+    const isOut = error instanceof ProblemError && error.code === 'not signed in';
+    if (!isOut || operation.path === '/session') throw error;
+    await whenSignedInAgain(error);
+    return sendWithToken(operation, call);
+  }
+}
+
+/** Once more after a new sign-in: the page stays, and what was to be sent goes then. */
+async function sendTrusted<O extends Operation>(operation: O, call: Call<O>): Promise<Response> {
+  try {
+    return await sendWithToken(operation, call);
+  } catch (error) {
+    if (!(error instanceof ProblemError)) throw error;
+    if (error.code !== 'not signed in' || operation.path === '/session') throw error;
+    await whenSignedInAgain(error);
+    return sendWithToken(operation, call);
+  }
+}
+
+/** Once more with a fresh token: that of a session that has ended is refused before anyone asks who is signed in. */
+async function sendWithToken<O extends Operation>(operation: O, call: Call<O>): Promise<Response> {
   try {
     return await send(operation, call);
   } catch (error) {
-    if (!(error instanceof ProblemError)) throw error;
-    if (error.code === 'request not trusted' && operation.method !== 'GET') {
-      forgetCsrfToken();
-      return send(operation, call);
-    }
-    if (error.code === 'not signed in' && operation.path !== '/session') {
-      await whenSignedInAgain(error);
-      return send(operation, call);
-    }
-    throw error;
+    const isStale = error instanceof ProblemError && error.code === 'request not trusted';
+    if (!isStale || operation.method === 'GET') throw error;
+    forgetCsrfToken();
+    return send(operation, call);
   }
 }
 

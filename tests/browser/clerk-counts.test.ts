@@ -8,7 +8,7 @@ for (const device of bothDevices) {
   journey(
     `a clerk at the ${device} counts as declared, another number, damaged ones and a photo`,
     async ({ at, stage, scene }) => {
-      const shipment = await emptiesToKestrel(stage, scene, { 'TOTE-64': 400, 'LID-128': 20 });
+      const shipment = await emptiesToKestrel({ stage, scene }, { 'TOTE-64': 400, 'LID-128': 20 });
       const inge = await at(device, scene.people.inge);
       await inge.open('/shipments');
       await inge.sees(shipment.reference);
@@ -43,7 +43,7 @@ for (const device of bothDevices) {
 journey(
   'two people count the same delivery: the second is told who and when, and nothing is posted',
   async ({ at, stage, scene }) => {
-    const shipment = await emptiesToKestrel(stage, scene, { 'TOTE-64': 80 });
+    const shipment = await emptiesToKestrel({ stage, scene }, { 'TOTE-64': 80 });
     const [first, second] = [await at('phone', scene.people.inge), await at('desk', scene.people.inge)];
     for (const each of [first, second]) {
       await each.open(`/shipments/${shipment.id}/count`);

@@ -46,8 +46,10 @@ export async function counted(stage: Stage, { shipment, load, on = today() }: Co
   );
 }
 
+type OnStage = { stage: Stage; scene: Scene };
+
 /** Empties on their way from Tarnby to Kestrel. */
-export const emptiesToKestrel = (stage: Stage, scene: Scene, load: Load, on?: string) =>
+export const emptiesToKestrel = ({ stage, scene }: OnStage, load: Load, on?: string) =>
   sent(stage, {
     contents: 'empties',
     from: scene.sites.tarnby.id,

@@ -65,6 +65,12 @@ export class Visit {
     await auditPage(this.page, this.device);
   }
 
+  /** Takes back what the browser complained of where the journey means it to happen. */
+  forgive(expected: RegExp): void {
+    const left = this.trouble.splice(0).filter((each) => !expected.test(each));
+    this.trouble.push(...left);
+  }
+
   /** What the browser complained of since the last call. */
   troubles(): string[] {
     return this.trouble.splice(0);
