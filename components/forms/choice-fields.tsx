@@ -24,7 +24,7 @@ export function DateField({ name, ...rest }: Named & { from?: string; to?: strin
   return <DateInput {...rest} {...field} value={value ?? ''} />;
 }
 
-export function ChoiceField({ name, ...rest }: Named & { options: readonly Option[] }) {
+export function ChoiceField({ name, ...rest }: Named & { options: readonly Option[]; below?: boolean }) {
   const { value, id, error, onChange } = useField<string>(name, rest.label);
   return <Choice {...rest} id={id} error={error} onChange={onChange} value={value ?? ''} />;
 }

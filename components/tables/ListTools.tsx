@@ -11,9 +11,9 @@ import { TextInput } from '../ui/TextInput';
 import { nextSort, type Column } from './column';
 import type { ListState } from './use-list-state';
 
-export type Filter = { key: string; label: string } & (
-  { options: readonly Option[] } | { day: true } | { month: true }
-);
+export type Filter = { key: string; label: string } &
+  /** `usual` names what is shown while nothing is chosen, where that is not everything. */
+  ({ options: readonly Option[]; usual?: string } | { day: true } | { month: true });
 
 type Props<Row> = {
   state: ListState;
@@ -97,7 +97,7 @@ function FilterInput({ filter, state }: { filter: Filter; state: ListState }) {
       {'options' in filter ? (
         <Select
           label={filter.label}
-          placeholder={text.ui.all}
+          placeholder={filter.usual ?? text.ui.all}
           options={filter.options}
           value={value}
           onChange={change}

@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { day } from '../domain/calendar';
 import { positiveUnits } from '../domain/quantity';
+import { typeKinds } from './container-types';
 import { code, id, instant, prose } from './fields';
 import { storedFile } from './files';
 import { listQuery, pageOf } from './list';
@@ -33,7 +34,9 @@ export const differenceRow = z.object({
   from: end,
   to: end,
   /** What of it is open (or was settled), by type; always above 0, the kind says which way. */
-  lines: z.array(z.object({ typeCode: z.string(), typeName: z.string(), units })),
+  lines: z.array(
+    z.object({ typeCode: z.string(), typeName: z.string(), typeKind: z.enum(typeKinds), units }),
+  ),
   units,
   /** The day it began: of the count, or the day it left. */
   since: day,
@@ -94,7 +97,14 @@ export const differenceDetail = differenceRow.extend({
   settlements: z.array(settlement),
   /** Open differences of the same shipment the other way round: what it may have been taken for. */
   swaps: z.array(z.object({ id, typeName: z.string(), openUnits: units })),
-  bearers: z.array(z.object({ companyId: id, company: z.string(), side: z.enum(['sender', 'receiver']) })),
+  bearers: z.array(
+    z.object({
+      companyId: id,
+      company: z.string(),
+      kind: z.enum(['operator', 'partner']),
+      side: z.enum(['sender', 'receiver']),
+    }),
+  ),
   /** The ways that fit; empty for who may not settle. */
   choices: z.array(z.enum(chosenWays)),
   timeZone: z.string(),

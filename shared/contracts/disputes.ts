@@ -3,6 +3,7 @@ import { day } from '../domain/calendar';
 import { decimalString } from '../domain/money';
 import { positiveUnits, wholeUnits } from '../domain/quantity';
 import { lineComponents } from '../domain/statement/components';
+import { typeKinds } from './container-types';
 import { code, id, instant, month, prose, proseOrEmpty } from './fields';
 import { mostFilesOnOne, storedFile } from './files';
 import { listQuery, pageOf } from './list';
@@ -266,6 +267,7 @@ const lineSubject = z.object({
   component: z.enum(lineComponents),
   typeCode: z.string().nullable(),
   typeName: z.string().nullable(),
+  typeKind: z.enum(typeKinds).nullable(),
   quantity: units,
   amount: z.string(),
   currency: z.string(),

@@ -45,6 +45,7 @@ export function selectDifferences(db: Reader) {
       difference: differences,
       reference: shipments.reference,
       typeName: containerTypes.name,
+      typeKind: containerTypes.kind,
       currency: companies.currency,
       ...laneColumns,
     })
@@ -75,7 +76,7 @@ export async function foundOf(db: Reader, rows: readonly SelectedDifference[]): 
       importId: null,
       reference: row.reference,
       ...endsOf(row),
-      lines: [{ typeCode: difference.typeCode, typeName, units }],
+      lines: [{ typeCode: difference.typeCode, typeName, typeKind: row.typeKind, units }],
       units,
       since: difference.openedOn,
       atStake: formatMinor(difference.atStake.replace(/\.?0+$/, ''), currency),

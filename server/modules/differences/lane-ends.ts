@@ -12,6 +12,7 @@ export const laneColumns = {
   toSite: toSite.name,
   fromCompanyId: fromCompany.id,
   fromCompany: fromCompany.name,
+  fromKind: fromCompany.kind,
   fromCurrency: fromCompany.currency,
   toCompanyId: toCompany.id,
   toCompany: toCompany.name,

@@ -80,6 +80,7 @@ async function declaredOf(db: Reader, ids: readonly string[]): Promise<Map<strin
       shipmentId: shipmentLines.shipmentId,
       typeCode: shipmentLines.typeCode,
       typeName: containerTypes.name,
+      typeKind: containerTypes.kind,
       units: shipmentLines.declared,
     })
     .from(shipmentLines)

@@ -55,8 +55,18 @@ function choicesOf(openUnits: number, hasSwap: boolean): ChosenWay[] {
 }
 
 function bearersOf(row: SelectedDifference): DifferenceDetail['bearers'] {
-  const sender = { companyId: row.fromCompanyId, company: row.fromCompany, side: 'sender' as const };
-  const receiver = { companyId: row.toCompanyId, company: row.toCompany, side: 'receiver' as const };
+  const sender = {
+    companyId: row.fromCompanyId,
+    company: row.fromCompany,
+    kind: row.fromKind,
+    side: 'sender' as const,
+  };
+  const receiver = {
+    companyId: row.toCompanyId,
+    company: row.toCompany,
+    kind: row.toKind,
+    side: 'receiver' as const,
+  };
   return sender.companyId === receiver.companyId ? [sender] : [sender, receiver];
 }
 

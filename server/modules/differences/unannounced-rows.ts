@@ -79,6 +79,7 @@ async function countedOf(db: Reader, ids: readonly string[]): Promise<Map<string
       receiptId: receiptLines.receiptId,
       typeCode: receiptLines.typeCode,
       typeName: containerTypes.name,
+      typeKind: containerTypes.kind,
       units: receiptLines.counted,
     })
     .from(receiptLines)

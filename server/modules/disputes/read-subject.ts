@@ -24,11 +24,11 @@ export async function readCountSubject(
   const declared = await db.select().from(shipmentLines).where(eq(shipmentLines.shipmentId, shipmentId));
   const counted = await db.select().from(countLines).where(eq(countLines.countId, count.id));
   const codes = [...new Set([...declared, ...counted].map((line) => line.typeCode))].sort();
-  const types = new Map(await typeNames(db, codes));
+  const types = await typesOf(db, codes);
   const lines = await Promise.all(
     codes.map(async (typeCode) => ({
       typeCode,
-      typeName: types.get(typeCode) ?? typeCode,
+      typeName: types.get(typeCode)?.name ?? typeCode,
       declared: declared.find((line) => line.typeCode === typeCode)?.declared ?? 0,
       counted: await countedNow(db, { shipmentId, countId: count.id, toSiteId: shipment.toSiteId, typeCode }),
       openDisputeId: await openDisputeOf(db, `count ${count.id} ${typeCode}`, person),
@@ -53,7 +53,7 @@ export async function readLineSubject(
   const own = await ownLine(db, { companyId: person.companyId, lineId });
   const { statement, line } = own;
   const openDisputeId = await openDisputeOf(db, `line ${line.id}`, person);
-  const types = new Map(line.typeCode ? await typeNames(db, [line.typeCode]) : []);
+  const type = (await typesOf(db, line.typeCode ? [line.typeCode] : [])).get(line.typeCode ?? '');
   return {
     lineId,
     statementId: statement.id,
@@ -62,7 +62,8 @@ export async function readLineSubject(
     accountMonth: line.accountMonth,
     component: line.component,
     typeCode: line.typeCode,
-    typeName: line.typeCode ? (types.get(line.typeCode) ?? line.typeCode) : null,
+    typeName: type?.name ?? line.typeCode,
+    typeKind: type?.kind ?? null,
     quantity: line.quantity,
     amount: money(line.amount, statement.currency),
     currency: statement.currency,
@@ -91,13 +92,15 @@ function countedShipments(db: Reader, companyId: string): Promise<LineSubject['s
     .limit(60);
 }
 
-async function typeNames(db: Reader, codes: readonly string[]): Promise<[string, string][]> {
-  if (codes.length === 0) return [];
+type TypeWords = { code: string; name: string; kind: NonNullable<LineSubject['typeKind']> };
+
+async function typesOf(db: Reader, codes: readonly string[]): Promise<Map<string, TypeWords>> {
+  if (codes.length === 0) return new Map();
   const types = await db
-    .select({ code: containerTypes.code, name: containerTypes.name })
+    .select({ code: containerTypes.code, name: containerTypes.name, kind: containerTypes.kind })
     .from(containerTypes)
     .where(inArray(containerTypes.code, [...codes]));
-  return types.map((type) => [type.code, type.name]);
+  return new Map(types.map((type) => [type.code, type]));
 }
 
 async function siteNames(db: Reader, ids: readonly string[]): Promise<Map<string, string>> {

@@ -1,7 +1,8 @@
-import type { DisputeReason, DisputeRow, DisputeState } from '../../contracts/disputes';
+import type { DisputeReason, DisputeRow, DisputeState, LineSubject } from '../../contracts/disputes';
 import type { LineComponent } from '../../domain/statement/components';
 import { formatDay, formatMoney, formatMonth, formatUnits } from '../format';
 import { plural } from '../plural';
+import { statements } from './statements';
 
 const reasons: Record<DisputeReason, string> = {
   'counted wrongly': 'It was counted wrongly',
@@ -49,6 +50,7 @@ export const disputes = {
   list: {
     head: 'Disputes',
     search: 'Shipment or statement',
+    chosen: (about: string) => `› ${about}`,
     emptyOperator: 'No dispute waits for a decision',
     emptyOperatorBody:
       'When a partner says that a count or a statement line is wrong, it stands here with its papers, the longest silence first.',
@@ -206,7 +208,11 @@ export const disputes = {
     counted: (units: number) => `${formatUnits(units)} counted`,
     countOf: (reference: string, day: string) => `${reference}, counted on ${formatDay(day, 'date')}`,
     lane: (from: string, to: string) => `${from} → ${to}`,
-    line: (component: LineComponent, quantity: string) => `${components[component]}: ${quantity}`,
+    line: (it: LineSubject) => {
+      const quantity = it.way === null ? '' : `: ${statements.unitsOfKind(it.quantity, it.typeKind ?? '')}`;
+      return `${components[it.component]}${quantity}`;
+    },
+    unitDays: (quantity: number) => `${formatUnits(quantity)} unit-days`,
     already: 'This is in dispute already.',
     openIt: 'Open the dispute',
     blocked: {
@@ -217,6 +223,10 @@ export const disputes = {
     },
     backToShipment: (reference: string) => `Shipment ${reference}`,
     backToStatement: (month: string) => `Statement, ${formatMonth(month)}`,
+  },
+  files: {
+    going: 'Sending the file …',
+    notSent: (name: string) => `${name} did not arrive.`,
   },
   mail: {
     subject: 'A dispute has moved on',

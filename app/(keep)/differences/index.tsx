@@ -1,0 +1,5 @@
+import { DifferencesScreen } from '@/components/differences/DifferencesScreen';
+
+export default function DifferencesRoute() {
+  return <DifferencesScreen />;
+}

@@ -1,0 +1,5 @@
+import { DisputesScreen } from '@/components/disputes/DisputesScreen';
+
+export default function DisputesRoute() {
+  return <DisputesScreen />;
+}
