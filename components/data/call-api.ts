@@ -29,18 +29,6 @@ export async function callApi<O extends Operation>(operation: O, call: Call<O> =
   return parsed.data as AnswerOf<O>;
 }
 
-/** Once more after a new sign-in. */
-async function sendTrusted<O extends Operation>(operation: O, call: Call<O>): Promise<Response> {
-  try {
-    return await sendWithToken(operation, call);
-  } catch (error) {
-    const isOut = error instanceof ProblemError && error.code === 'not signed in';
-    if (!isOut || operation.path === '/session') throw error;
-    await whenSignedInAgain(error);
-    return sendWithToken(operation, call);
-  }
-}
-
 /** Once more after a new sign-in: the page stays, and what was to be sent goes then. */
 async function sendTrusted<O extends Operation>(operation: O, call: Call<O>): Promise<Response> {
   try {
