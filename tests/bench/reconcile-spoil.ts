@@ -62,8 +62,9 @@ const clone = (lines: readonly Line[]) => lines.map((line) => ({ ...line }));
 export function miscount(draw: Draw, lines: readonly Line[], types: readonly string[]): Line[] {
   const counted = clone(lines);
   for (const line of counted) {
-    if (draw.chance(0.03))
-      line.quantity = Math.max(1, line.quantity + draw.one([-8, -5, -3, -2, -1, 1, 2, 3, 5]));
+    const few = draw.one([-8, -5, -3, -2, -1, 1, 2, 3, 5]);
+    // Nobody takes eleven for six: a few is at most a quarter of the line.
+    if (draw.chance(0.03) && 4 * Math.abs(few) <= line.quantity) line.quantity += few;
     if (draw.chance(0.005)) line.type = draw.one(types.filter((type) => type !== line.type));
   }
   return merged(counted);

@@ -25,7 +25,10 @@ export function settleMistyped(desk: Desk, doubts: readonly Doubt[], near: NearS
     [...inDoubt, ...found],
     (candidate) => mayMatch(candidate) && !undecided.has(candidate.receipt),
   );
-  for (const { receipt } of settled) for (const twin of again.get(receipt) ?? []) desk.double(twin, receipt);
+  // As in doubts: the double entry is told, also where its shipment is left to a person.
+  const covering = found.filter(({ likeness }) => likeness < 2);
+  for (const receipt of new Set([...settled, ...covering].map((candidate) => candidate.receipt)))
+    for (const twin of again.get(receipt) ?? []) desk.double(twin, receipt);
   const stillInDoubt = settleDoubts(desk, doubts, alternatives);
   return [...stillInDoubt, ...found];
 }
