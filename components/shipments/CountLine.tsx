@@ -129,7 +129,7 @@ function OfTheseRow({ words: said, children }: { words: string; children: React.
   return (
     <Box row spread="between" gap="m">
       <Text>{said}</Text>
-      <Box least={96}>{children}</Box>
+      <Box width={112}>{children}</Box>
     </Box>
   );
 }
