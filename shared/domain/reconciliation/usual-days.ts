@@ -24,14 +24,15 @@ export class UsualDays {
     const total = totalOf(counts);
     const upTo = [...counts].reduce((sum, [d, n]) => sum + (d <= days ? n : 0), 0);
     const from = [...counts].reduce((sum, [d, n]) => sum + (d >= days ? n : 0), 0);
-    return upTo > RARE * total && from > RARE * total;
+    const few = rareIn(total);
+    return upTo > few && from > few;
   }
 
   /** Longer than all but the rarest deliveries of the lane took; null where no habit is known. */
   isTooLong(lane: string, days: number): boolean | null {
     const counts = this.countsOf(lane);
     if (!counts) return null;
-    return [...counts].reduce((sum, [d, n]) => sum + (d >= days ? n : 0), 0) <= RARE * totalOf(counts);
+    return [...counts].reduce((sum, [d, n]) => sum + (d >= days ? n : 0), 0) <= rareIn(totalOf(counts));
   }
 
   /** Share of the lane's deliveries that took this many days, never quite 0. */
@@ -47,6 +48,9 @@ export class UsualDays {
     return totalOf(this.all) >= ENOUGH ? this.all : null;
   }
 }
+
+/** One delivery alone makes no habit: it may be the very one that is looked at. */
+const rareIn = (total: number): number => Math.max(1, RARE * total);
 
 const totalOf = (counts: Map<number, number>): number => {
   let total = 0;
