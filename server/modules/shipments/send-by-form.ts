@@ -55,11 +55,10 @@ async function refuseForeignSites(
   const from = sites.get(form.fromSiteId);
   const to = sites.get(form.toSiteId);
   const fields: BadField[] = [];
-  if (from?.companyId !== person.companyId)
-    fields.push({ path: 'fromSiteId', message: 'Choose a site of your own company' });
+  if (from?.companyId === person.companyId) fields.push(...badDays(form, dayInZone(now, from.timeZone)));
+  else fields.push({ path: 'fromSiteId', message: 'Choose a site of your own company' });
   if (!to || to.company.kind === person.companyKind || !to.company.active)
     fields.push({ path: 'toSiteId', message: 'Choose a site from the list' });
-  if (from) fields.push(...badDays(form, dayInZone(now, from.timeZone)));
   if (fields.length > 0) throw new Problem('not valid', { fields });
 }
 
