@@ -61,9 +61,11 @@ function Plot({ label, summary, series, markers = [], yMost = 1, ...formats }: L
           <MarkerLine
             key={marker.key}
             marker={marker}
-            x={scale.x(marker.x)}
-            end={at === 0 && markers.length > 1}
-            top={scale.margin.top}
+            x={x(marker.x)}
+            top={margin.top}
+            // The left one of two speaks to its left; near the right edge there is only that side.
+            end={(at === 0 && markers.length > 1) || x(marker.x) > width * 0.75}
+            raised={at === 0 && markers.length > 1 && x(markers[1]?.x ?? 0) > width * 0.75}
           />
         ))}
         {series.map((each) => (
@@ -117,14 +119,16 @@ function Axes({ scale, width, yMost, formatX = String, formatY = formatNumber }:
   );
 }
 
-function MarkerLine({ marker, x, end, top }: { marker: Marker; x: number; end: boolean; top: number }) {
+type MarkerProps = { marker: Marker; x: number; top: number; end: boolean; raised: boolean };
+
+function MarkerLine({ marker, x, top, end, raised }: MarkerProps) {
   const colour = tones[marker.tone].line;
   return (
     <>
       <Line x1={x} x2={x} y1={top} y2={height - 28} stroke={colour} strokeWidth={2} />
       <SvgText
         x={end ? x - 4 : x + 4}
-        y={top - 8}
+        y={raised ? top - 24 : top - 8}
         textAnchor={end ? 'end' : 'start'}
         fontFamily={fontFamily}
         fontSize={typeSize.small}

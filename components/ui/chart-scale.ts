@@ -4,7 +4,7 @@ import { curveMonotoneX, line } from 'd3-shape';
 export type Point = { x: number; y: number };
 export type ChartBox = { width: number; height: number };
 
-const margin = { top: 28, right: 16, bottom: 28, left: 48 } as const;
+const margin = { top: 40, right: 16, bottom: 28, left: 48 } as const;
 
 /** Scales and paths of a line chart of this size; `yMost` is the top of the vertical axis. */
 export function chartScale(points: readonly Point[], { width, height }: ChartBox, yMost: number) {
@@ -21,7 +21,8 @@ export function chartScale(points: readonly Point[], { width, height }: ChartBox
   return {
     x,
     y,
-    xTicks: x.ticks(5),
+    // A number of five digits needs some 110 px beside the next.
+    xTicks: x.ticks(Math.max(2, Math.min(5, Math.floor(width / 110)))),
     yTicks: y.ticks(4),
     pathOf: (series: readonly Point[]) => path([...series]) ?? '',
     margin,

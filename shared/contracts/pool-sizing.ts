@@ -36,6 +36,10 @@ const planFigures = z.object({
   workingDaysPerYear: z.int().min(1).max(366),
 });
 
+/** The few assumptions that are turned beside the figure itself. */
+export const planTurns = planFigures.pick({ bufferDays: true, coverPct: true, travel: true });
+export type PlanTurns = z.infer<typeof planTurns>;
+
 /** The loop of a type and what is assumed of it; percentages in percent, days are working days. */
 export const poolPlan = planFigures
   .refine(({ legs }) => legs.some((each) => !isZero(each.days.mean)), {

@@ -1,6 +1,6 @@
 import { sql } from 'drizzle-orm';
 import type { Reader } from '@/db/client';
-import { poolApprovals } from '@/db/schema/containers';
+import type { poolApprovals } from '@/db/schema/containers';
 import { latestApprovals } from './latest-approvals';
 
 export type SiteLevel = { siteId: string; minimum: number; maximum: number };

@@ -25,7 +25,8 @@ export async function seenTimesOf(db: Reader, typeCode: string, today: string): 
   ];
   const stock = (stretch: 'at the partner' | 'at the plant', side: Side) => {
     const perDay = workingDays > 0 ? out[side] / workingDays : 0;
-    const days = perDay > 0 ? average[side] / perDay : null;
+    // A stock that the book has below zero is not what stood there.
+    const days = perDay > 0 && average[side] >= 0 ? average[side] / perDay : null;
     return { stretch, days, sd: null, shipments: null, units: average[side], unitsOut: out[side] };
   };
   return {

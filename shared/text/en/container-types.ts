@@ -36,6 +36,8 @@ export const containerTypes = {
     `${type.lengthMm} × ${type.widthMm} × ${type.heightMm}`,
 
   facts: 'What it is',
+  factHead: 'Fact',
+  asStated: 'As stated',
   fact: {
     size: 'Outer length × width × height',
     tare: 'Tare',

@@ -20,7 +20,6 @@ export const parts = {
   use: { 'in use': 'in use', 'out of use': 'out of use' },
   columns: {
     number: 'Part',
-    name: 'Name',
     type: 'Travels in',
     between: 'Between',
     perContainer: 'A container',
@@ -28,6 +27,7 @@ export const parts = {
     containers: 'Containers a day',
     state: 'State',
   },
+  partName: (number: string, name: string) => `${number} ${name}`,
   between: (supplier: string, plant: string) => `${supplier} → ${plant}`,
   perDay: (mean: string, sd: string) => `${mean} ± ${sd}`,
 

@@ -1,9 +1,13 @@
 import { formatDay, formatNumber, formatShare, formatUnits } from '../format';
 import { plural } from '../plural';
 
+/** A share that is not 0 never reads as 0. */
+const share = (value: number) => (value > 0 && value < 0.0005 ? 'under 0.1\u202f%' : formatShare(value));
+
 type Units = { units: number; many: string };
 
 export const pool = {
+  share,
   title: 'Pool',
   lead: 'How many of each type are there, how many are needed, and what is approved.',
   empty: {
@@ -110,9 +114,9 @@ export const pool = {
   today: (units: number) => `today ${formatUnits(units)}`,
   needed: (units: number) => `needed ${formatUnits(units)}`,
   summaryNeeded: (size: number, cover: number, fallback: number) =>
-    `A pool of ${formatUnits(size)} finds enough empties for a day’s dispatch with a chance of ${formatShare(cover)}; ${formatShare(fallback)} of loads find none and go out one-way.`,
+    `A pool of ${formatUnits(size)} finds enough empties for a day’s dispatch with a chance of ${share(cover)}; ${share(fallback)} of loads find none and go out one-way.`,
   summaryToday: (size: number, cover: number, fallback: number) =>
-    `Today’s ${formatUnits(size)}: ${formatShare(cover)} and ${formatShare(fallback)}.`,
+    `Today’s ${formatUnits(size)}: ${share(cover)} and ${share(fallback)}.`,
   summaryNoToday: 'The book holds none today.',
 
   running: 'What running short costs',
@@ -122,8 +126,8 @@ export const pool = {
   runningToday: 'with today’s pool',
   runningNeeded: 'with the needed pool',
   runningYear: (money: string) => `${money} a year`,
-  runningFrom: (share: number, trips: number) =>
-    `${formatShare(share)} of ${formatUnits(Math.round(trips))} loads a year`,
+  runningFrom: (of: number, trips: number) =>
+    `${share(of)} of ${formatUnits(Math.round(trips))} loads a year`,
 
   how: 'How this is reckoned',
   reckoned: {
@@ -177,6 +181,8 @@ export const pool = {
     units: 'There now',
     standing: 'Stands',
   },
+  levelLine: (site: string, { minimum, maximum }: { minimum: number; maximum: number }) =>
+    `${site}: ${formatUnits(minimum)} to ${formatUnits(maximum)}`,
   levels: 'Who is under or over',
   levelsNone: 'No levels are approved for this type.',
   under: (units: number) => `${formatUnits(units)} under`,

@@ -7,7 +7,7 @@ export async function aPoolScene(product: Product) {
   const sif = await product.aPerson(lane.operator, ['engineer'], { name: 'Sif Holm' });
   const engineer = await product.as(sif);
   const part = await engineer.post('/parts', partForm(lane));
-  return { ...lane, engineer, partId: part.body.id as string };
+  return { ...lane, sif, engineer, partId: part.body.id as string };
 }
 export type PoolScene = Awaited<ReturnType<typeof aPoolScene>>;
 

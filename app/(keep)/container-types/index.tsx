@@ -1,0 +1,5 @@
+import { ContainerTypesScreen } from '@/components/container-types/ContainerTypesScreen';
+
+export default function ContainerTypesRoute() {
+  return <ContainerTypesScreen />;
+}

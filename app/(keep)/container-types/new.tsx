@@ -1,0 +1,5 @@
+import { NewTypeScreen } from '@/components/container-types/NewTypeScreen';
+
+export default function NewTypeRoute() {
+  return <NewTypeScreen />;
+}

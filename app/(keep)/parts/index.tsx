@@ -1,0 +1,5 @@
+import { PartsScreen } from '@/components/parts/PartsScreen';
+
+export default function PartsRoute() {
+  return <PartsScreen />;
+}

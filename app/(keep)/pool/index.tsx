@@ -1,0 +1,5 @@
+import { PoolListScreen } from '@/components/pool/PoolListScreen';
+
+export default function PoolListRoute() {
+  return <PoolListScreen />;
+}
