@@ -1,3 +1,5 @@
+import type { Stretch } from '@/shared/contracts/pool-sizing';
+
 /** Packing specifications for the pool's demand. */
 export const parts = [
   {
@@ -7,8 +9,28 @@ export const parts = [
     supplier: 'KESTREL',
     plant: 'TARNBY',
     unitsPerContainer: 12,
-    mean: '1760',
-    sd: '240',
+    mean: '1920',
+    sd: '260',
+  },
+  {
+    number: 'BR-1145',
+    name: 'bracket set',
+    typeCode: 'TOTE-64',
+    supplier: 'ORRIN',
+    plant: 'TARNBY',
+    unitsPerContainer: 10,
+    mean: '320',
+    sd: '60',
+  },
+  {
+    number: 'VB-3007',
+    name: 'valve body',
+    typeCode: 'TOTE-64',
+    supplier: 'VALE',
+    plant: 'OSTREL',
+    unitsPerContainer: 20,
+    mean: '640',
+    sd: '110',
   },
   {
     number: 'HS-0417',
@@ -62,63 +84,63 @@ export const parts = [
   },
 ] as const;
 
-/** The loop of each type with demand; days from the coordinator's own notes, invented. */
+/** The loop of each type with demand; working days with the waits for the next truck in them, invented. */
 export const loops: Readonly<
   Record<
     string,
     {
       travel: 'independent' | 'together';
       bufferDays: string;
-      legs: readonly (readonly [string, number, number])[];
+      legs: readonly (readonly [name: string, stretch: Stretch, mean: number, sd: number])[];
     }
   >
 > = {
   'TOTE-64': {
     travel: 'together',
-    bufferDays: '2',
+    bufferDays: '6',
     legs: [
-      ['filled at the supplier', 1.5, 0.5],
-      ['on the way to the plant', 1, 0.3],
-      ['full stock at the plant', 2, 1],
-      ['at the line', 0.5, 0.1],
-      ['empties at the plant', 2.5, 1.2],
-      ['on the way back', 1, 0.3],
+      ['filled at the supplier', 'at the partner', 7, 2],
+      ['on the way to the plant', 'to the plant', 1.1, 0.3],
+      ['full stock at the plant', 'at the plant', 5, 2],
+      ['at the line', 'at the plant', 0.5, 0.1],
+      ['empties at the plant', 'at the plant', 8, 2.5],
+      ['on the way back', 'back', 1.1, 0.3],
     ],
   },
   'TOTE-43': {
     travel: 'together',
-    bufferDays: '2',
+    bufferDays: '4',
     legs: [
-      ['filled at the supplier', 2, 0.7],
-      ['on the way to the plant', 1, 0.3],
-      ['full stock at the plant', 3, 1.2],
-      ['at the line', 0.5, 0.2],
-      ['empties at the plant', 2, 1],
-      ['on the way back', 1, 0.3],
+      ['filled at the supplier', 'at the partner', 6, 2],
+      ['on the way to the plant', 'to the plant', 1, 0.3],
+      ['full stock at the plant', 'at the plant', 5, 2],
+      ['at the line', 'at the plant', 0.5, 0.2],
+      ['empties at the plant', 'at the plant', 5, 2],
+      ['on the way back', 'back', 1, 0.3],
     ],
   },
   'BOX-1210': {
     travel: 'independent',
-    bufferDays: '3',
+    bufferDays: '5',
     legs: [
-      ['filled at the supplier', 2, 0.8],
-      ['on the way to the plant', 1, 0.4],
-      ['full stock at the plant', 2.5, 1],
-      ['at the line', 1, 0.3],
-      ['empties at the plant', 3, 1.5],
-      ['on the way back', 1.5, 0.5],
+      ['filled at the supplier', 'at the partner', 7, 2],
+      ['on the way to the plant', 'to the plant', 1.2, 0.4],
+      ['full stock at the plant', 'at the plant', 5, 2],
+      ['at the line', 'at the plant', 1, 0.3],
+      ['empties at the plant', 'at the plant', 8, 3],
+      ['on the way back', 'back', 1.5, 0.5],
     ],
   },
   'RACK-CP': {
     travel: 'together',
-    bufferDays: '1',
+    bufferDays: '3',
     legs: [
-      ['filled at the supplier', 1, 0.3],
-      ['on the way to the plant', 0.5, 0.2],
-      ['full stock at the plant', 1.5, 0.5],
-      ['at the line', 0.5, 0.1],
-      ['empties at the plant', 1.5, 0.8],
-      ['on the way back', 0.5, 0.2],
+      ['filled at the supplier', 'at the partner', 5, 1.5],
+      ['on the way to the plant', 'to the plant', 1, 0.3],
+      ['full stock at the plant', 'at the plant', 5, 1.5],
+      ['at the line', 'at the plant', 0.5, 0.1],
+      ['empties at the plant', 'at the plant', 7, 2],
+      ['on the way back', 'back', 1, 0.3],
     ],
   },
 };

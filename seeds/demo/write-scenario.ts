@@ -175,7 +175,7 @@ async function writePool(tx: Transaction, { cast, now }: Writing): Promise<void>
     });
   }
   for (const [typeCode, loop] of Object.entries(loops)) {
-    const legs = loop.legs.map(([name, mean, sd]) => ({ name, days: { mean, sd } }));
+    const legs = loop.legs.map(([name, stretch, mean, sd]) => ({ name, stretch, days: { mean, sd } }));
     await tx.insert(poolPlans).values({
       typeCode,
       travel: loop.travel,
