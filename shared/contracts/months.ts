@@ -74,6 +74,8 @@ export const readMonth = operation({
   }),
 });
 
+export const closing = z.object({ reason: proseOrEmpty(500) });
+
 export const closeMonth = operation({
   name: 'closeMonth',
   resource: 'months',
@@ -81,7 +83,7 @@ export const closeMonth = operation({
   path: '/months/:month/close',
   summary: 'Close a month and make its draft statements; asks for a reason while something stands open',
   params: monthParams,
-  body: z.object({ reason: proseOrEmpty(500) }),
+  body: closing,
   answer: z.object({ month: z.string(), jobId: id }),
 });
 

@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { movementKinds } from '../domain/assessment/input';
 import { contentDifference, contentMovement, statementContent } from '../domain/statement/content';
+import { lineComponents } from '../domain/statement/components';
 import { id, month } from './fields';
 import { listQuery, pageOf } from './list';
 import { operation } from './operation';
@@ -96,8 +97,12 @@ export const listStatementMovements = operation({
   summary: 'The movements behind a figure of a statement',
   params: statementParams,
   query: listQuery.extend({
-    /** A line of money. */
+    /** A line of money, or all lines of a component, which for a correction names the closed month too. */
     line: z.string().max(40).optional(),
+    component: z.enum(lineComponents).optional(),
+    corrects: month.optional(),
+    /** What came before the month and makes its opening figures. */
+    before: z.enum(['yes']).optional(),
     type: z.string().max(20).optional(),
     kind: z.enum([...movementKinds, 'corrected']).optional(),
   }),

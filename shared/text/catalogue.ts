@@ -6,6 +6,7 @@ import { fields } from './en/fields';
 import { imports } from './en/imports';
 import { gallery } from './en/gallery';
 import { letters, log } from './en/log';
+import { months } from './en/months';
 import { parts } from './en/parts';
 import { partners } from './en/partners';
 import { people } from './en/people';
@@ -14,6 +15,8 @@ import { problems } from './en/problems';
 import { session } from './en/session';
 import { shell } from './en/shell';
 import { shipments } from './en/shipments';
+import { statements } from './en/statements';
+import { terms } from './en/terms';
 import { today } from './en/today';
 import { ui } from './en/ui';
 
@@ -28,6 +31,7 @@ export const text = {
   gallery,
   letters,
   log,
+  months,
   parts,
   partners,
   people,
@@ -36,6 +40,8 @@ export const text = {
   session,
   shell,
   shipments,
+  statements,
+  terms,
   today,
   ui,
 } as const;

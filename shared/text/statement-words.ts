@@ -1,6 +1,7 @@
 import type { AssessmentTerms } from '../domain/assessment';
-import { compare } from '../domain/money';
+import { compare, multiply, roundToMinor } from '../domain/money';
 import type { ContentLine } from '../domain/statement/content';
+import { formatAmount, formatDecimal, formatUnits } from './format';
 import { statements as words } from './en/statements';
 
 export type WordContext = {
@@ -21,6 +22,44 @@ export function reckonedFrom(line: ContentLine, context: WordContext): string {
   if (line.correction) return line.correction.causes.join('; ') || words.reckoned.late;
   if (line.credit) return line.credit.reason;
   return byComponent[line.component](line, context);
+}
+
+/** All lines of one component together, as one row of the page shows them. */
+export function reckonedTogether(lines: readonly ContentLine[], context: WordContext): string {
+  const [first] = lines;
+  if (!first) return '';
+  if (first.correction) {
+    const causes = [...new Set(lines.flatMap((line) => line.correction?.causes ?? []))];
+    return causes.join('; ') || words.reckoned.late;
+  }
+  if (first.component === 'deposits released') {
+    return words.reckoned.released(lines.map((line) => unitsOf(line, context)).join(', '));
+  }
+  return lines.map((line) => reckonedFrom(line, context)).join(', ');
+}
+
+/** The sum of a line written out with its own figures: "3 440 unit-days × 0.03 = 103.20". */
+export function workedOut(line: ContentLine, context: WordContext): string {
+  const amount = (of: string) => formatAmount(of, context.currency);
+  if (line.correction) {
+    return words.worked.difference(
+      amount(line.correction.now),
+      amount(line.correction.billed),
+      amount(line.amount),
+    );
+  }
+  if (line.rate !== null) {
+    return words.worked.fee(formatUnits(line.quantity), formatDecimal(line.rate), amount(line.amount));
+  }
+  if (line.parts.length === 0) return `${unitsOf(line, context)}: ${amount(line.amount)}`;
+  return line.parts
+    .map(({ quantity, each, residual, deposit }) => {
+      const total = roundToMinor(multiply(each, quantity), context.currency);
+      const sum = words.worked.times(unitsOf({ ...line, quantity }, context), amount(each), amount(total));
+      if (residual === undefined || deposit === undefined) return sum;
+      return `${words.worked.less(amount(residual), amount(deposit), amount(each))}; ${sum}`;
+    })
+    .join('; ');
 }
 
 type Words = (line: ContentLine, context: WordContext) => string;
@@ -57,7 +96,7 @@ const eachAt: Words = (line, context) =>
     .join(', ');
 
 /** "12 totes"; with the type's name where two types of one kind would read alike. */
-function unitsOf(
+export function unitsOf(
   { quantity, typeCode }: Pick<ContentLine, 'quantity' | 'typeCode'>,
   { types }: WordContext,
 ): string {

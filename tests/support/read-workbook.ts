@@ -102,15 +102,11 @@ const attribute = (tag: string, name: string) =>
 const all = (text: string, pattern: RegExp) => [...text.matchAll(pattern)].map((match) => match[1] ?? '');
 const named: Record<string, string> = { lt: '<', gt: '>', amp: '&', quot: '"', apos: "'" };
 const decoded = (text: string) =>
-  text.replace(
-    /&(?:#x([0-9a-fA-F]+)|#(\d+)|(\w+));/g,
-    (_whole, hex: string, decimal: string, name: string) =>
-      hex
-        ? String.fromCodePoint(parseInt(hex, 16))
-        : decimal
-          ? String.fromCodePoint(Number(decimal))
-          : (named[name] ?? ''),
-  );
+  text.replace(/&([^;]+);/g, (whole, name: string) => {
+    if (name.startsWith('#x')) return String.fromCodePoint(parseInt(name.slice(2), 16));
+    if (name.startsWith('#')) return String.fromCodePoint(Number(name.slice(1)));
+    return named[name] ?? whole;
+  });
 
 /** Day of a spreadsheet's serial number, 1900 system (ECMA-376 part 1, 18.17.4.1). */
 export const dayOfSerial = (serial: number): string =>

@@ -1,7 +1,14 @@
+import { and, asc, eq, lt } from 'drizzle-orm';
 import type { Database } from '@/db/client';
+import { statements } from '@/db/schema/statements';
 import type { QueryOf } from '@/shared/contracts/operation';
 import type { listStatementMovements } from '@/shared/contracts/statements';
-import type { ContentLine, ContentMovement, StatementContent } from '@/shared/domain/statement/content';
+import {
+  type ContentLine,
+  type ContentMovement,
+  statementContent,
+  type StatementContent,
+} from '@/shared/domain/statement/content';
 import { Problem } from '@/shared/problems/problems';
 import { cursor, cutPage } from '../../http/page';
 import type { Person } from '../../http/person';
@@ -10,28 +17,52 @@ import { visibleStatement } from './read-statement';
 type Query = QueryOf<typeof listStatementMovements>;
 type Asked = { id: string; person: Person; query: Query };
 
-/** The movements behind a figure, from the statement's own content: what it was reckoned from, not what came later. */
+/** The movements behind a figure, from the statements' own content: what it was reckoned from, not what came later. */
 export async function movementsPage(db: Database, { id, person, query }: Asked) {
-  const { content } = await visibleStatement(db, { id, person });
-  const wanted = content.movements.filter(filterOf(content, query));
+  const { content, row } = await visibleStatement(db, { id, person });
+  const movements = query.before ? await movementsBefore(db, row, content) : content.movements;
+  const wanted = movements.filter(filterOf(content, query));
   const after = cursor(query.after, 1);
   const from = after ? wanted.findIndex((movement) => movement.id === after[0]) + 1 : 0;
-  return cutPage(wanted.slice(from, from + query.limit + 1), query.limit, (row) => [row.id]);
+  return cutPage(wanted.slice(from, from + query.limit + 1), query.limit, (each) => [each.id]);
+}
+
+/** What the partner's earlier statements took in, and what this one learnt late of their months. */
+async function movementsBefore(
+  db: Database,
+  row: { companyId: string; month: string },
+  { movements }: StatementContent,
+): Promise<ContentMovement[]> {
+  const earlier = await db
+    .select({ content: statements.content })
+    .from(statements)
+    .where(and(eq(statements.companyId, row.companyId), lt(statements.month, row.month)))
+    .orderBy(asc(statements.month));
+  const told = earlier.flatMap(({ content }) => statementContent.parse(content).movements);
+  return [...told, ...movements.filter((movement) => movement.lateFor !== null)].sort((a, b) =>
+    a.date < b.date ? -1 : a.date > b.date ? 1 : Number(a.id) - Number(b.id),
+  );
 }
 
 function filterOf(content: StatementContent, query: Query): (movement: ContentMovement) => boolean {
-  const line = query.line === undefined ? undefined : lineOf(content, query.line);
+  const lines = linesOf(content, query);
   const kindOf = kindsWithCorrections(content.movements);
   return (movement) =>
-    (line === undefined || isBehind(movement, line, kindOf)) &&
+    (lines === null || lines.some((line) => isBehind(movement, line, kindOf))) &&
     (query.type === undefined || movement.typeCode === query.type) &&
     (query.kind === undefined || (movement.lateFor === null && kindOf(movement) === query.kind));
 }
 
-function lineOf(content: StatementContent, id: string): ContentLine {
-  const line = content.lines.find((each) => each.id === id);
-  if (!line) throw new Problem('not found');
-  return line;
+/** The lines asked for; null where none are, and so nothing is narrowed. */
+function linesOf(content: StatementContent, query: Query): ContentLine[] | null {
+  if (query.line !== undefined) {
+    const line = content.lines.find((each) => each.id === query.line);
+    if (!line) throw new Problem('not found');
+    return [line];
+  }
+  if (query.component === undefined) return null;
+  const month = query.corrects ?? content.month;
+  return content.lines.filter((line) => line.component === query.component && line.accountMonth === month);
 }
 
 const kindBehind: Partial<Record<ContentLine['component'], ContentMovement['kind']>> = {

@@ -15,18 +15,8 @@ const terms: AssessmentTerms = {
   cleaningFee: '0.40',
   recoveryDays: 60,
 };
-const event = (
-  id: string,
-  date: string,
-  kind: 'issued' | 'returned' | 'lost' | 'damaged',
-  quantity: number,
-) => ({
-  id,
-  date,
-  containerType: 'TOTE',
-  kind,
-  quantity,
-});
+type Moved = { date: string; kind: 'issued' | 'returned' | 'lost' | 'damaged'; quantity: number };
+const event = (id: string, moved: Moved) => ({ id, containerType: 'TOTE', ...moved });
 const input = (
   month: string,
   events: AssessmentEvent[],
@@ -57,12 +47,12 @@ const told = (given: StatementInput): EarlierStatement => {
   };
 };
 
-const february = [event('1', '2026-02-02', 'issued', 400)];
+const february = [event('1', { date: '2026-02-02', kind: 'issued', quantity: 400 })];
 const march = [
-  event('2', '2026-03-04', 'issued', 100),
-  event('3', '2026-03-20', 'returned', 80),
-  event('4', '2026-03-25', 'lost', 12),
-  event('5', '2026-03-20', 'damaged', 16),
+  event('2', { date: '2026-03-04', kind: 'issued', quantity: 100 }),
+  event('3', { date: '2026-03-20', kind: 'returned', quantity: 80 }),
+  event('4', { date: '2026-03-25', kind: 'lost', quantity: 12 }),
+  event('5', { date: '2026-03-20', kind: 'damaged', quantity: 16 }),
 ];
 
 describe('lines of a statement', () => {

@@ -1,0 +1,5 @@
+import { MonthsScreen } from '@/components/months/MonthsScreen';
+
+export default function MonthsRoute() {
+  return <MonthsScreen />;
+}

@@ -1,0 +1,5 @@
+import { StatementsScreen } from '@/components/statements/StatementsScreen';
+
+export default function StatementsRoute() {
+  return <StatementsScreen />;
+}

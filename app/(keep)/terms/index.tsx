@@ -1,0 +1,5 @@
+import { TermsScreen } from '@/components/terms/TermsScreen';
+
+export default function TermsRoute() {
+  return <TermsScreen />;
+}

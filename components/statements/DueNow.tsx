@@ -1,0 +1,23 @@
+import { compare } from '@/shared/domain/money';
+import { text } from '@/shared/text/catalogue';
+import { formatMoney } from '@/shared/text/format';
+import { Box } from '../ui/Box';
+import { Figure } from '../ui/Figure';
+import { Text } from '../ui/Text';
+import type { StatementPage } from './StatementScreen';
+
+const words = text.statements.page;
+
+/** The figure that matters, and what of the statement is held back while it is disputed. */
+export function DueNow({ page }: { page: StatementPage }) {
+  const { state, dueNow, held, currency } = page;
+  return (
+    <Box gap="xs" align="end">
+      <Text variant="soft">{state === 'draft' ? words.wouldBeDue : words.dueNow}</Text>
+      <Figure money={dueNow} currency={currency} size="figure" />
+      {compare(held, '0') === 0 ? null : (
+        <Text tone="disputed">{words.heldNote(formatMoney(held, currency))}</Text>
+      )}
+    </Box>
+  );
+}

@@ -1,0 +1,75 @@
+import { listPartners } from '@/shared/contracts/partners';
+import {
+  listStatements,
+  statementAnswers,
+  type StatementRow,
+  statementStates,
+} from '@/shared/contracts/statements';
+import { text } from '@/shared/text/catalogue';
+import { useRead, useReadPages } from '../data/use-operation';
+import { useSignedIn } from '../data/use-session';
+import { RecordList } from '../tables/RecordList';
+import { useListState } from '../tables/use-list-state';
+import { ButtonLink } from '../ui/Link';
+import { Page } from '../ui/Page';
+import { statementColumns } from './statement-columns';
+
+const words = text.statements.list;
+
+/** All statements, newest month first; a partner sees its own. */
+export function StatementsScreen() {
+  const { company, may } = useSignedIn();
+  const { kind } = company;
+  const state = useListState({
+    filters: kind === 'operator' ? ['month', 'partner', 'state', 'answer'] : ['month', 'answer'],
+  });
+  const list = useReadPages(listStatements, { query: state.query });
+  const filters = useFilters(kind);
+  return (
+    <Page title={text.statements.head} lead={words.lead[kind]}>
+      <RecordList<StatementRow>
+        label={text.statements.head}
+        list={list}
+        columns={statementColumns(kind)}
+        rowKey={(row) => row.id}
+        rowHref={(row) => `/statements/${row.id}`}
+        state={state}
+        filters={filters}
+        searchLabel={words.search}
+        empty={{
+          title: words.empty,
+          hint: words.emptyHint[kind],
+          ...(may('close months') ? { action: <ButtonLink href="/months" label={words.toMonths} /> } : {}),
+        }}
+      />
+    </Page>
+  );
+}
+
+function useFilters(kind: 'operator' | 'partner') {
+  const partners = useRead(listPartners, {
+    query: { kind: 'partner', limit: 200 },
+    enabled: kind === 'operator',
+  }).data;
+  const month = { key: 'month', label: words.filter.month, month: true as const };
+  const answer = {
+    key: 'answer',
+    label: words.filter.answer,
+    options: statementAnswers.map((value) => ({ value, label: text.statements.page.tags[value] })),
+  };
+  if (kind === 'partner') return [month, answer];
+  return [
+    month,
+    {
+      key: 'partner',
+      label: words.filter.partner,
+      options: (partners?.rows ?? []).map(({ id, name }) => ({ value: id, label: name })),
+    },
+    {
+      key: 'state',
+      label: words.filter.state,
+      options: statementStates.map((value) => ({ value, label: words.states[value] })),
+    },
+    answer,
+  ];
+}
