@@ -1,4 +1,4 @@
-import { bigint, check, index, mysqlTable, uniqueIndex, varchar } from 'drizzle-orm/mysql-core';
+import { bigint, check, index, mysqlTable, primaryKey, uniqueIndex, varchar } from 'drizzle-orm/mysql-core';
 import { sql } from 'drizzle-orm';
 import { amount, code, day, id, instant, units } from '../columns';
 import { companies, people } from './companies';
@@ -166,7 +166,7 @@ export const disputeFiles = mysqlTable(
       .references(() => files.id),
   },
   (table) => [
-    index('dispute_files_message').on(table.messageId),
+    primaryKey({ columns: [table.messageId, table.fileId] }),
     index('dispute_files_file').on(table.fileId),
   ],
 );
