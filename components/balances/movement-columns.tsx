@@ -25,7 +25,7 @@ export function movementColumns(onTakeBack: (row: MovementRow) => void): Column<
     { key: 'day', head: head.day, cell: (row) => formatDay(row.valueDate) },
     { key: 'from', head: head.from, cell: (row) => words.place(row.from) },
     { key: 'to', head: head.to, cell: (row) => words.place(row.to) },
-    { key: 'by', head: head.by, cell: (row) => row.by ?? '' },
+    { key: 'by', head: head.by, cell: (row) => row.by ?? '', cardRole: 'hidden' },
     { key: 'shipment', head: head.shipment, cell: (row) => <Behind row={row} onTakeBack={onTakeBack} /> },
   ];
 }

@@ -1,6 +1,6 @@
-import { listShipments, type ShipmentRow } from '@/shared/contracts/shipments';
+import { listShipmentChoices, listShipments, type ShipmentRow } from '@/shared/contracts/shipments';
 import { text } from '@/shared/text/catalogue';
-import { useReadPages } from '../data/use-operation';
+import { useRead, useReadPages } from '../data/use-operation';
 import { useSignedIn } from '../data/use-session';
 import { RecordList } from '../tables/RecordList';
 import type { Filter } from '../tables/ListTools';
@@ -14,16 +14,31 @@ const words = text.shipments;
 const optionsOf = (labels: Record<string, string>) =>
   Object.entries(labels).map(([value, label]) => ({ value, label }));
 
-const filters: readonly Filter[] = [
+const usualFilters: readonly Filter[] = [
   { key: 'direction', label: words.filter.direction, options: optionsOf(words.direction) },
   { key: 'state', label: words.filter.state, options: optionsOf(words.state) },
   { key: 'contents', label: words.filter.contents, options: optionsOf(words.contents) },
 ];
 
+/** For the operator: one of the partners that shipments can go to. */
+function usePartnerFilter(isOperator: boolean): Filter[] {
+  const choices = useRead(listShipmentChoices, { enabled: isOperator });
+  const partners = new Map(choices.data?.to.map((site) => [site.companyId, site.company]));
+  if (!isOperator || partners.size === 0) return [];
+  return [
+    {
+      key: 'partner',
+      label: words.filter.partner,
+      options: [...partners].map(([value, label]) => ({ value, label })),
+    },
+  ];
+}
+
 export function ShipmentsScreen() {
   const { may, company } = useSignedIn();
   const state = useListState({ filters: ['direction', 'state', 'contents', 'partner'] });
   const list = useReadPages(listShipments, { query: state.query as never });
+  const filters = [...usualFilters, ...usePartnerFilter(company.kind === 'operator')];
   const sends = company.kind === 'operator' ? 'empties' : 'fulls';
   const send = may('send shipments') ? (
     <ButtonLink href="/shipments/send" label={words.send[sends]} />

@@ -39,5 +39,6 @@ export type TypedLine = {
   dirty?: number | string | null;
 };
 
-/** Whether a line has its number. */
-export const isCounted = (typed: TypedLine | undefined): boolean => typeof typed?.counted === 'number';
+/** Whether something is written for a line; what is no number is told at its field when it is sent. */
+export const isCounted = ({ counted }: TypedLine): boolean =>
+  counted !== undefined && counted !== null && counted !== '';

@@ -1,6 +1,7 @@
 import type { Today } from '@/shared/contracts/today';
 import { text } from '@/shared/text/catalogue';
-import { formatDay } from '@/shared/text/format';
+import { formatDay, formatMoney } from '@/shared/text/format';
+import { useIsWide } from '../theme/use-breakpoint';
 import { Box } from '../ui/Box';
 import { Card } from '../ui/Card';
 import { Figure } from '../ui/Figure';
@@ -57,7 +58,9 @@ function What({ row }: { row: Row }) {
 /** The coordinator's: the oldest first, with what is at stake. */
 export function DifferencesCard({ today }: { today: Today }) {
   const { differences } = today;
+  const wide = useIsWide();
   if (!differences || differences.total === 0) return null;
+  if (!wide) return <DifferencesOnPhone differences={differences} />;
   return (
     <Card
       title={words.differences}
@@ -74,6 +77,30 @@ export function DifferencesCard({ today }: { today: Today }) {
         stack
       />
     </Card>
+  );
+}
+
+function DifferencesOnPhone({ differences }: { differences: NonNullable<Today['differences']> }) {
+  return (
+    <WorkCard
+      title={words.differences}
+      all={{ total: differences.total, href: '/differences' }}
+      rows={differences.rows.map((row) => ({
+        key: row.id,
+        tag: saidOf(row),
+        title: row.reference,
+        beside: row.typeName,
+        lines: [
+          words.between(row.from, row.to),
+          [words.openFor(row.openDays), formatMoney(row.atStake.amount, row.atStake.currency)].join(' · '),
+        ],
+        action: {
+          href: `/differences/${row.id}`,
+          label: words.settle,
+          name: words.settleOf(row.reference),
+        },
+      }))}
+    />
   );
 }
 

@@ -11,7 +11,7 @@ export function MonthEndCard({ today }: { today: Today }) {
   const { months } = today;
   if (!months) return null;
   const rows: WorkRow[] = [
-    ...months.toClose.map((month) => ({
+    ...months.toClose.map((month, at) => ({
       key: `close ${month}`,
       title: words.toClose(formatMonth(month)),
       lines: [],
@@ -19,7 +19,7 @@ export function MonthEndCard({ today }: { today: Today }) {
         href: `/months/${month}`,
         label: words.close,
         name: words.closeOf(formatMonth(month)),
-        button: 'primary' as const,
+        button: at === 0 ? ('primary' as const) : ('secondary' as const),
       },
     })),
     ...months.drafts.map(({ month, statements }) => ({

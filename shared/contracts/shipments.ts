@@ -135,7 +135,13 @@ export const readShipment = operation({
   answer: shipmentDetail,
 });
 
-const siteChoice = z.object({ id, name: z.string(), company: z.string(), timeZone: z.string() });
+const siteChoice = z.object({
+  id,
+  name: z.string(),
+  companyId: id,
+  company: z.string(),
+  timeZone: z.string(),
+});
 const typeChoice = z.object({ code: z.string(), name: z.string(), unitsPerStack: z.number().int() });
 
 export const listShipmentChoices = operation({

@@ -41,7 +41,13 @@ export async function shipmentChoices(
 
 function sitesWhere(db: Reader, where: ReturnType<typeof eq>) {
   return db
-    .select({ id: sites.id, name: sites.name, company: companies.name, timeZone: sites.timeZone })
+    .select({
+      id: sites.id,
+      name: sites.name,
+      companyId: companies.id,
+      company: companies.name,
+      timeZone: sites.timeZone,
+    })
     .from(sites)
     .innerJoin(companies, eq(companies.id, sites.companyId))
     .where(and(where, eq(sites.active, true), eq(companies.active, true)))

@@ -6,16 +6,19 @@ import { outbox } from '@/db/schema/work';
 import { aProduct, type Product } from '../../support/app';
 import { aLane, counted, fulls, type Lane, sentEmpties } from '../../support/lane';
 
+const now = '2026-03-20T09:00:00.000Z';
 let product: Product;
 let lane: Lane;
-beforeEach(async () => {
+beforeAll(async () => {
   product = await aProduct('today');
+});
+beforeEach(async () => {
+  product.setClock(now);
   lane = await aLane(product);
 });
-afterEach(() => product.close());
+afterAll(() => product.close());
 
 const load = (units: number) => ({ [lane.type.code]: units });
-const now = '2026-03-20T09:00:00.000Z';
 
 describe('Today', () => {
   it('gives a clerk what is to be counted, what the company holds and what differs', async () => {
@@ -54,21 +57,23 @@ describe('Today', () => {
     await sentEmpties(lane, load(48));
     await lane.clerk.post('/shipments', fulls(lane, load(60)));
     const { body } = await lane.coordinator.get('/today');
-    expect(body.pool.types).toEqual([
-      expect.objectContaining({
-        plants: 552,
-        partners: 332,
-        empties: 48,
-        fulls: 60,
-        inQuestion: 8,
-        total: 1000,
-        atStake: [{ currency: 'EUR', amount: '144.00' }],
-      }),
-    ]);
-    expect(body.differences).toMatchObject({
-      total: 1,
-      rows: [{ openUnits: -8, atStake: { currency: 'EUR', amount: '144.00' } }],
+    const pool = body.pool.types.find((each: { typeCode: string }) => each.typeCode === lane.type.code);
+    expect(pool).toMatchObject({
+      plants: 552,
+      partners: 332,
+      empties: 48,
+      fulls: 60,
+      inQuestion: 8,
+      total: 1000,
+      atStake: [{ currency: 'EUR', amount: '144.00' }],
     });
+    expect(body.differences.rows).toContainEqual(
+      expect.objectContaining({
+        shipmentId: first,
+        openUnits: -8,
+        atStake: { currency: 'EUR', amount: '144.00' },
+      }),
+    );
     expect(body.toCount.rows.map((row: { contents: string }) => row.contents)).toEqual(['fulls']);
     expect(body.holding).toBeNull();
   });
@@ -80,8 +85,8 @@ describe('Today', () => {
       const { body } = await (await product.as(lane.ane)).get('/today');
       return body.overdue.rows.map((row: { id: string }) => row.id);
     };
-    expect(await overdueOn('2026-03-28T09:00:00.000Z')).toEqual([]);
-    expect(await overdueOn('2026-03-29T09:00:00.000Z')).toEqual([id]);
+    expect(await overdueOn('2026-03-28T09:00:00.000Z')).not.toContain(id);
+    expect(await overdueOn('2026-03-29T09:00:00.000Z')).toContain(id);
   });
 
   it('gives the engineer what is under or over its approved size or level', async () => {
