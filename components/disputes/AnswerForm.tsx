@@ -1,3 +1,4 @@
+import { useState } from 'react';
 import { useWatch } from 'react-hook-form';
 import { answerDispute, answerSteps, type DisputeDetail } from '@/shared/contracts/disputes';
 import { text } from '@/shared/text/catalogue';
@@ -23,6 +24,7 @@ export function AnswerForm({ dispute }: { dispute: DisputeDetail }) {
     schema: answerDraft,
     defaultValues: { seenMessageId, text: '', files: [] },
   });
+  const [unsent, setUnsent] = useState(false);
   const post = usePost(answerDispute, {
     refreshes: ['differences', 'shipments', 'balances', 'statements', 'today'],
   });
@@ -32,6 +34,7 @@ export function AnswerForm({ dispute }: { dispute: DisputeDetail }) {
         draft={draft}
         label={words.head}
         submitLabel={words.send}
+        disabled={unsent}
         onSubmit={async (values) => {
           await post.mutateAsync({ params: { dispute: dispute.id }, body: withFileIds(values) });
           announce(words.done);
@@ -46,7 +49,7 @@ export function AnswerForm({ dispute }: { dispute: DisputeDetail }) {
         />
         <StepFields draft={draft} dispute={dispute} />
         <TextAreaField name="text" label={words.text} hint={words.textNeeded} />
-        <SentFilesField name="files" label={words.paper} />
+        <SentFilesField onUnsent={setUnsent} name="files" label={words.paper} />
       </FormFrame>
     </Card>
   );

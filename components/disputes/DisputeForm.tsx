@@ -1,5 +1,5 @@
 import { router } from 'expo-router';
-import type { ReactNode } from 'react';
+import { type ReactNode, useState } from 'react';
 import { disputeReasons, openDispute } from '@/shared/contracts/disputes';
 import { text } from '@/shared/text/catalogue';
 import { usePost } from '../data/use-operation';
@@ -24,6 +24,7 @@ type Props = {
 
 /** The form of every dispute: the claim, why, what happened, the paper. */
 export function DisputeForm({ draft, label, claim, more }: Props) {
+  const [unsent, setUnsent] = useState(false);
   const post = usePost(openDispute, { refreshes: ['shipments', 'statements', 'differences', 'today'] });
   return (
     <FormFrame
@@ -31,6 +32,7 @@ export function DisputeForm({ draft, label, claim, more }: Props) {
       label={label}
       submitLabel={words.send}
       inBar
+      disabled={unsent}
       onSubmit={async (values) => {
         const { id } = await post.mutateAsync({ body: withFileIds(values) });
         announce(words.done);
@@ -46,7 +48,7 @@ export function DisputeForm({ draft, label, claim, more }: Props) {
       />
       {more}
       <TextAreaField name="text" label={words.what} />
-      <SentFilesField name="files" label={words.paper} hint={words.paperHelp} />
+      <SentFilesField onUnsent={setUnsent} name="files" label={words.paper} hint={words.paperHelp} />
     </FormFrame>
   );
 }

@@ -1,3 +1,4 @@
+import { useState } from 'react';
 import { useWatch } from 'react-hook-form';
 import { type LineSubject, readLineSubject } from '@/shared/contracts/disputes';
 import { amountOfUnits, isClaimableAmount } from '@/shared/domain/disputed-line';
@@ -17,7 +18,7 @@ import { Page } from '../ui/Page';
 import { Skeleton } from '../ui/Skeleton';
 import { Tag } from '../ui/Tag';
 import { Text } from '../ui/Text';
-import { openingDraft } from './dispute-draft';
+import { lineDraft, type openingDraft } from './dispute-draft';
 import { DisputeForm } from './DisputeForm';
 import { ShipmentField } from './ShipmentField';
 
@@ -84,9 +85,10 @@ function Blocked({ subject }: { subject: LineSubject }) {
 }
 
 function LineForm({ subject }: { subject: LineSubject }) {
+  const [schema] = useState(() => lineDraft(subject));
   const draft = useDraftForm({
     name: `dispute line ${subject.lineId}`,
-    schema: openingDraft,
+    schema,
     defaultValues: { subject: 'statement line', lineId: subject.lineId, text: '', files: [] },
   });
   return (

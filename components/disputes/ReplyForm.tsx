@@ -25,6 +25,7 @@ export function ReplyForm({ dispute }: { dispute: DisputeDetail }) {
     schema: replyDraft,
     defaultValues: { text: '', files: [] },
   });
+  const [unsent, setUnsent] = useState(false);
   const post = usePost(replyToDispute, { refreshes });
   return (
     <Card title={words.head} level={3}>
@@ -32,6 +33,7 @@ export function ReplyForm({ dispute }: { dispute: DisputeDetail }) {
         draft={draft}
         label={words.head}
         submitLabel={words.send}
+        disabled={unsent}
         more={<Withdraw dispute={dispute} />}
         onSubmit={async (values) => {
           await post.mutateAsync({ params: { dispute: dispute.id }, body: withFileIds(values) });
@@ -39,7 +41,7 @@ export function ReplyForm({ dispute }: { dispute: DisputeDetail }) {
         }}
       >
         <TextAreaField name="text" label={words.text} />
-        <SentFilesField name="files" label={text.disputes.answer.paper} />
+        <SentFilesField onUnsent={setUnsent} name="files" label={text.disputes.answer.paper} />
       </FormFrame>
     </Card>
   );

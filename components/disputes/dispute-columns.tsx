@@ -41,7 +41,9 @@ const held: Column<DisputeRow> = {
   key: 'held',
   head: words.column.held,
   align: 'end',
-  cell: (row) => <Figure money={row.amountHeld} currency={row.currency} plain />,
+  cell: (row) => (
+    <Figure money={row.subject === 'count' ? null : row.amountHeld} currency={row.currency} plain />
+  ),
 };
 const state: Column<DisputeRow> = {
   key: 'state',

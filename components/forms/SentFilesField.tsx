@@ -1,3 +1,5 @@
+import { useEffect } from 'react';
+import { useFormContext } from 'react-hook-form';
 import { downloadFile, mostFilesOnOne } from '@/shared/contracts/files';
 import { text } from '@/shared/text/catalogue';
 import { urlOf } from '../data/url-of';
@@ -10,13 +12,23 @@ import { Text } from '../ui/Text';
 import { useField } from './use-field';
 import { type SentFile, useSentFiles } from './use-sent-files';
 
-type Props = { name: string; label: string; hint?: string; kind?: 'photo' | 'paper' };
+type Props = {
+  name: string;
+  label: string;
+  hint?: string;
+  kind?: 'photo' | 'paper';
+  /** Whether a file is under way or did not arrive: the form is not sent without it. */
+  onUnsent: (unsent: boolean) => void;
+};
 
 /** Files that are sent as they are picked: what is with the server survives a reload with the rest of the form. */
-export function SentFilesField({ name, label, hint, kind = 'paper' }: Props) {
+export function SentFilesField({ name, label, hint, kind = 'paper', onUnsent }: Props) {
   const field = useField<SentFile[]>(name, label);
   const kept = field.value ?? [];
-  const sending = useSentFiles((file) => field.onChange([...kept, file]));
+  const { getValues } = useFormContext();
+  const sending = useSentFiles((file) => field.onChange([...((getValues(name) as SentFile[]) ?? []), file]));
+  const unsent = sending.isGoing || sending.failed.length > 0;
+  useEffect(() => onUnsent(unsent), [unsent, onUnsent]);
   return (
     <Box gap="s">
       {kept.length > 0 ? (

@@ -2,7 +2,7 @@ import { z } from 'zod';
 import { day } from '../domain/calendar';
 import { positiveUnits } from '../domain/quantity';
 import { typeKinds } from './container-types';
-import { code, id, instant, prose } from './fields';
+import { code, id, instant, needed, prose } from './fields';
 import { storedFile } from './files';
 import { listQuery, pageOf } from './list';
 import { operation } from './operation';
@@ -131,11 +131,13 @@ export const settlingForm = z
     bearerCompanyId: id.optional(),
     swapWithId: id.optional(),
   })
-  .superRefine((form, context) => {
-    if (form.way === 'lost on the way' && !form.bearerCompanyId)
-      context.addIssue({ code: 'custom', path: ['bearerCompanyId'], message: 'Say who bears the loss' });
-    if (form.way === 'wrong type' && !form.swapWithId)
-      context.addIssue({ code: 'custom', path: ['swapWithId'], message: 'Say which type it was taken for' });
+  .refine((form) => form.way !== 'lost on the way' || form.bearerCompanyId !== undefined, {
+    ...needed('bearerCompanyId'),
+    message: 'Say who bears the loss',
+  })
+  .refine((form) => form.way !== 'wrong type' || form.swapWithId !== undefined, {
+    ...needed('swapWithId'),
+    message: 'Say which type it was taken for',
   });
 
 export const settleDifference = operation({

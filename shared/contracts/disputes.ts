@@ -4,7 +4,7 @@ import { decimalString } from '../domain/money';
 import { positiveUnits, wholeUnits } from '../domain/quantity';
 import { lineComponents } from '../domain/statement/components';
 import { typeKinds } from './container-types';
-import { code, id, instant, month, prose, proseOrEmpty } from './fields';
+import { code, id, instant, month, needed, prose, proseOrEmpty } from './fields';
 import { mostFilesOnOne, storedFile } from './files';
 import { listQuery, pageOf } from './list';
 import { operation } from './operation';
@@ -139,18 +139,10 @@ export const openingForm = z
     text: prose(4000),
     fileIds,
   })
-  .superRefine((form, context) => {
-    const need = (path: string, held: unknown) => {
-      if (held === undefined) context.addIssue({ code: 'custom', path: [path], message: 'This is needed' });
-    };
-    if (form.subject === 'count') {
-      need('shipmentId', form.shipmentId);
-      need('typeCode', form.typeCode);
-      need('claimed', form.claimed);
-    } else {
-      need('lineId', form.lineId);
-    }
-  });
+  .refine((form) => form.subject !== 'count' || form.shipmentId !== undefined, needed('shipmentId'))
+  .refine((form) => form.subject !== 'count' || form.typeCode !== undefined, needed('typeCode'))
+  .refine((form) => form.subject !== 'count' || form.claimed !== undefined, needed('claimed'))
+  .refine((form) => form.subject === 'count' || form.lineId !== undefined, needed('lineId'));
 export type OpeningForm = z.output<typeof openingForm>;
 
 const disputed = z.object({ id, state: z.enum(disputeStates) });
@@ -178,9 +170,9 @@ export const answerForm = z
     /** The last message that was read; another one in between is not answered unseen. */
     seenMessageId: id,
   })
-  .superRefine((form, context) => {
-    if (form.step !== 'accept' && form.text === '')
-      context.addIssue({ code: 'custom', path: ['text'], message: 'Say why' });
+  .refine((form) => form.step === 'accept' || form.text !== '', {
+    ...needed('text'),
+    message: 'Say why',
   });
 export type AnswerForm = z.output<typeof answerForm>;
 

@@ -34,3 +34,10 @@ export const month = z.string().regex(/^\d{4}-(0[1-9]|1[0-2])$/, 'A month like 2
 
 /** A UTC instant, ISO 8601. */
 export const instant = z.iso.datetime({ offset: false });
+
+/** For a field that is needed only beside others: told together with whatever else is wrong, not after it. */
+export const needed = (path: string) => ({
+  path: [path],
+  message: 'This is needed',
+  when: ({ value }: { value: unknown }) => typeof value === 'object' && value !== null,
+});

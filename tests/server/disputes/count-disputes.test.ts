@@ -214,6 +214,19 @@ describe('what cannot be disputed', () => {
     expect(answer.body.fields[0].path).toBe('claimed');
   });
 
+  it('names everything that is missing at once, whatever else is sent', async () => {
+    const { shipmentId } = await counted(200, 190);
+    const answer = await scene.clerk.post('/disputes', { subject: 'count', shipmentId });
+    expect(answer.status).toBe(400);
+    expect(answer.body.fields.map(({ path }: { path: string }) => path).sort()).toEqual([
+      'claimed',
+      'reason',
+      'text',
+      'typeCode',
+    ]);
+    expect((await scene.clerk.post('/disputes', [])).status).toBe(400);
+  });
+
   it('refuses a file of another company, and a file that is not what its name says', async () => {
     const { shipmentId } = await counted(200, 190);
     const foreign = await scene.aPaper(scene.otherClerk);
