@@ -49,6 +49,7 @@ function Plot({ label, summary, series, markers = [], yMost = 1, ...formats }: L
   const all = series.flatMap((each) => each.points);
   if (all.length === 0) return null;
   const scale = chartScale(all, { width, height }, yMost);
+  const isNearEdge = (marker: Marker) => scale.x(marker.x) > width * 0.75;
   return (
     <View
       role="img"
@@ -61,11 +62,11 @@ function Plot({ label, summary, series, markers = [], yMost = 1, ...formats }: L
           <MarkerLine
             key={marker.key}
             marker={marker}
-            x={x(marker.x)}
-            top={margin.top}
+            x={scale.x(marker.x)}
+            top={scale.margin.top}
             // The left one of two speaks to its left; near the right edge there is only that side.
-            end={(at === 0 && markers.length > 1) || x(marker.x) > width * 0.75}
-            raised={at === 0 && markers.length > 1 && x(markers[1]?.x ?? 0) > width * 0.75}
+            end={(at === 0 && markers.length > 1) || isNearEdge(marker)}
+            raised={at === 0 && markers.slice(1).some(isNearEdge)}
           />
         ))}
         {series.map((each) => (
