@@ -25,6 +25,7 @@ export function ImportScreen({ id }: { id: string }) {
     <Page
       title={held?.fileName ?? words.list.head}
       back={back}
+      narrow
       beside={held ? <Tag tone={stateTones[held.state]} label={words.states[held.state]} /> : null}
     >
       {detail.error ? <Problem error={detail.error} onRetry={() => void detail.refetch()} /> : null}

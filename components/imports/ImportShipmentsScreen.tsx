@@ -57,7 +57,7 @@ export function ImportShipmentsScreen({ id }: { id: string }) {
   const state = useListState({ filters: ['outcome'] });
   const list = useReadPages(listImportShipments, { params: { import: id }, query: state.query });
   return (
-    <Page title={words.head} back={{ href: `/imports/${id}`, label: text.imports.list.head }}>
+    <Page title={words.head} back={{ href: `/imports/${id}`, label: text.imports.oneHead }}>
       <RecordList<ImportDocument>
         label={words.head}
         list={list}

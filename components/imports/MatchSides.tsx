@@ -1,6 +1,6 @@
 import type { ImportMatch, MatchPaper } from '@/shared/contracts/import-results';
 import { text } from '@/shared/text/catalogue';
-import { formatDay, formatUnits } from '@/shared/text/format';
+import { formatDay } from '@/shared/text/format';
 import { Box } from '../ui/Box';
 import { Figure } from '../ui/Figure';
 import { Link } from '../ui/Link';
@@ -49,11 +49,6 @@ function Side({ head, paper, href }: { head: string; paper: MatchPaper; href?: s
   );
 }
 
-/** "EM-1001, 400 units" for labels. */
+/** "EM-501" or "the receipt of 3 March", for labels. */
 export const nameOfPapers = (papers: readonly MatchPaper[]): string =>
-  papers
-    .map(({ reference, lines }) => {
-      const units = lines.reduce((sum, line) => sum + line.units, 0);
-      return `${reference ?? words.noReference}, ${formatUnits(units)}`;
-    })
-    .join('; ');
+  papers.map(({ reference, day }) => reference ?? text.imports.receiptOf(day)).join(', ');

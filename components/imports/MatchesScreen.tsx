@@ -22,7 +22,7 @@ export function MatchesScreen({ id }: { id: string }) {
   const list = useReadPages(listImportMatches, { params: { import: id }, query: { ...query, state } });
   const title = query.rule ? words.rule(query.rule) : (titles[state] ?? words.matches.head);
   return (
-    <Page title={title} back={{ href: `/imports/${id}`, label: words.list.head }}>
+    <Page title={title} back={{ href: `/imports/${id}`, label: words.oneHead }}>
       <PagedCards<ImportMatch>
         list={list}
         rowKey={(match) => match.id}

@@ -1,6 +1,5 @@
 import { listImportRows, type ImportFileRow } from '@/shared/contracts/imports';
 import { text } from '@/shared/text/catalogue';
-import { formatUnits } from '@/shared/text/format';
 import { useReadPages } from '../data/use-operation';
 import type { Column } from '../tables/column';
 import { RecordList } from '../tables/RecordList';
@@ -30,7 +29,7 @@ const columns: readonly Column<ImportFileRow>[] = [
     head: words.preview.row,
     cardRole: 'title',
     whole: true,
-    cell: (row) => <CellText strong>{formatUnits(row.rowNo)}</CellText>,
+    cell: (row) => <CellText strong>{words.rowName(row.rowNo)}</CellText>,
   },
   {
     key: 'problems',
@@ -67,10 +66,16 @@ const filters = [
   },
 ];
 
+/** A card for each on a phone: a page stays short. */
+const rowsAtOnce = 20;
+
 /** The rows as they were read, the bad ones first. */
 export function PreviewRows({ id }: { id: string }) {
   const state = useListState({ filters: ['only'] });
-  const list = useReadPages(listImportRows, { params: { import: id }, query: state.query });
+  const list = useReadPages(listImportRows, {
+    params: { import: id },
+    query: { ...state.query, limit: rowsAtOnce },
+  });
   return (
     <Box gap="m">
       <Text variant="title">{words.preview.rowsHead}</Text>

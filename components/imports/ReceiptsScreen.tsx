@@ -27,8 +27,9 @@ export function ReceiptsScreen({ id }: { id: string }) {
   const chosen = useChosen();
   const book = usePost(bookUnannounced, { refreshes: ['shipments', 'differences', 'balances'] });
   const count = chosen.ids.length;
+  const isEmpty = list.data?.pages.every((page) => page.rows.length === 0) ?? true;
   const action =
-    state === 'unannounced' ? (
+    state === 'unannounced' && !isEmpty ? (
       <Button
         label={words.book(count)}
         disabled={count === 0}
@@ -40,7 +41,7 @@ export function ReceiptsScreen({ id }: { id: string }) {
     <Page
       title={words.heads[state]}
       lead={words.leads[state]}
-      back={{ href: `/imports/${id}`, label: text.imports.list.head }}
+      back={{ href: `/imports/${id}`, label: text.imports.oneHead }}
       {...(action ? { action } : {})}
     >
       {book.error ? <Problem error={book.error} /> : null}

@@ -26,6 +26,7 @@ export function SuggestionsScreen({ id }: { id: string }) {
     decide.mutate({ body: { decision, suggestions: [...chosen.ids] } }, { onSuccess: chosen.clear });
   const count = chosen.ids.length;
   const off = count === 0 || decide.isPending;
+  const isEmpty = list.data?.pages.every((page) => page.rows.length === 0) ?? true;
   const actions = (
     <Box row wrap gap="m">
       <Button label={words.accept(count)} disabled={off} onPress={() => send('accept')} />
@@ -36,8 +37,8 @@ export function SuggestionsScreen({ id }: { id: string }) {
     <Page
       title={words.head}
       lead={words.lead}
-      back={{ href: `/imports/${id}`, label: text.imports.list.head }}
-      action={actions}
+      back={{ href: `/imports/${id}`, label: text.imports.oneHead }}
+      {...(isEmpty ? {} : { action: actions })}
     >
       {decide.error ? <Problem error={decide.error} /> : null}
       {decide.data ? <Outcome outcome={decide.data as Decided} /> : null}

@@ -85,7 +85,7 @@ export const importReceipt = matchPaper.extend({
   rowNo: whole,
   /** Of a double entry: the receipt that was kept. */
   first: z.object({ reference: z.string().nullable(), day, rowNo: whole }).nullable(),
-  /** The shipment that was counted before, or that it was booked as. */
+  /** The shipment that the first was counted for, that someone had counted before, or that it was booked as. */
   shipment: z.object({ id, reference: z.string() }).nullable(),
 });
 export type ImportReceipt = z.infer<typeof importReceipt>;

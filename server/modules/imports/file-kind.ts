@@ -17,7 +17,6 @@ export function kindOf({ name, bytes }: { name: string; bytes: Buffer }): SheetK
 /** Text of a CSV: UTF-8, UTF-16 with its mark, or what older office programs save. Refuses what is no text. */
 export function textOf(bytes: Buffer): string {
   const text = decoded(bytes);
-  // eslint-disable-next-line no-control-regex -- control characters are what tells a program from a text
   if (/[\u0000-\u0008\u000b\u000e-\u001f]/.test(text) || /^\s*</.test(text)) throw notAsNamed();
   return text;
 }

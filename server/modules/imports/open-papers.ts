@@ -1,4 +1,4 @@
-import { and, asc, eq, inArray } from 'drizzle-orm';
+import { and, asc, eq, or } from 'drizzle-orm';
 import type { Reader } from '@/db/client';
 import { companies, sites } from '@/db/schema/companies';
 import { shipmentLines, shipments } from '@/db/schema/shipments';
@@ -33,9 +33,12 @@ export async function openShipments(db: Reader): Promise<Shipments> {
   return withLines(heads, lines).filter((shipment) => shipment.lines.length > 0);
 }
 
-/** Receipts that wait for a comparison, and those that no earlier one found a shipment for. */
-export async function openReceipts(db: Reader): Promise<Receipts> {
-  const open = inArray(receipts.state, ['waiting', 'unannounced']);
+/** The import's own receipts, and those that no earlier comparison found a shipment for. */
+export async function openReceipts(db: Reader, importId: string): Promise<Receipts> {
+  const open = or(
+    eq(receipts.state, 'unannounced'),
+    and(eq(receipts.state, 'waiting'), eq(receipts.importId, importId)),
+  );
   const heads = await db
     .select({
       id: receipts.id,

@@ -26,7 +26,7 @@ export async function planMatches(run: Run): Promise<void> {
     windowDays,
     overdueAfterDays,
     shipments: await openShipments(deps.db),
-    receipts: await openReceipts(deps.db),
+    receipts: await openReceipts(deps.db, importId),
   };
   const outcome = reconcile(input);
   await inTransaction(deps.db, (tx) => keepPlan(tx, { importId, input, outcome }));

@@ -39,7 +39,7 @@ async function postOne(run: Run, groupId: string): Promise<void> {
   }
 }
 
-/** A match that could not be posted: what someone counted meanwhile is told as such, the rest is left over. */
+/** A match that could not be posted: a receipt that is taken falls away, what someone counted meanwhile is told as such, the rest is left over. */
 async function setAside(
   tx: Transaction,
   { groupId, problem }: { groupId: string; problem: KeptProblem },
@@ -49,9 +49,10 @@ async function setAside(
     .from(receiptMatches)
     .where(eq(receiptMatches.groupId, groupId))
     .for('update');
+  const isTaken = problem.code === 'state changed';
   await tx
     .update(receiptMatches)
-    .set({ state: 'not posted', problem })
+    .set(isTaken ? { state: 'fell away' } : { state: 'not posted', problem })
     .where(eq(receiptMatches.groupId, groupId));
   const left =
     problem.code === 'already counted' && new Set(pairs.map(({ shipmentId }) => shipmentId)).size === 1

@@ -40,14 +40,16 @@ export async function pageOfReceipts(
   );
   const ships = await shipmentsOf(
     db,
-    page.map(({ id }) => id),
+    page.map(({ id, duplicateOf }) => duplicateOf ?? id),
   );
   return {
     rows: page.flatMap((row) => {
       const paper = papers.get(row.id);
       if (!paper) return [];
       const first = row.duplicateOf === null ? null : (firsts.get(row.duplicateOf) ?? null);
-      return [{ ...paper, state, rowNo: row.rowNo, first, shipment: ships.get(row.id) ?? null }];
+      return [
+        { ...paper, state, rowNo: row.rowNo, first, shipment: ships.get(row.duplicateOf ?? row.id) ?? null },
+      ];
     }),
     next: found.length > limit ? (page.at(-1)?.id ?? null) : null,
   };
@@ -64,7 +66,7 @@ async function firstOnes(db: Reader, ids: readonly string[]) {
   );
 }
 
-/** The shipment that a receipt was booked as, or that someone had counted before. */
+/** The shipment that a receipt was counted for or booked as, or that someone had counted before. */
 async function shipmentsOf(db: Reader, receiptIds: readonly string[]) {
   if (receiptIds.length === 0) return new Map<string, ImportReceipt['shipment']>();
   const rows = await db
@@ -74,7 +76,7 @@ async function shipmentsOf(db: Reader, receiptIds: readonly string[]) {
     .where(
       and(
         inArray(receiptMatches.receiptId, [...receiptIds]),
-        inArray(receiptMatches.state, ['accepted', 'not posted']),
+        inArray(receiptMatches.state, ['matched', 'accepted', 'not posted']),
       ),
     );
   return new Map(rows.map(({ receiptId, ...shipment }) => [receiptId, shipment]));

@@ -44,7 +44,6 @@ function unitsOf(text: string, context: Context): number | null {
 }
 
 const reference = z.string().transform((text, context) => {
-  // eslint-disable-next-line no-control-regex -- no line of a note or a mail may be forged by a reference
   if (/[\u0000-\u001f\u007f-\u009f\u2028\u2029]/.test(text)) return complain(context, 'not plain text');
   return text === '' ? null : text;
 });

@@ -19,11 +19,11 @@ const columns: Record<ImportColumn, string> = {
 
 /** One sentence for each reason why a row cannot be posted; the column's head stands before it. */
 const reasons: Record<RowReason, (data: Data) => string> = {
-  empty: () => 'is empty.',
+  empty: () => 'empty.',
   'side unknown': (data) => `“${said(data)}” is neither shipment nor receipt.`,
-  'reference missing': () => 'is missing. A shipment needs one; only a receipt may go without.',
-  'too long': (data) => `has more than ${formatUnits(Number(data.most))} characters.`,
-  'not plain text': () => 'holds signs that cannot be printed.',
+  'reference missing': () => 'missing. A shipment needs one; only a receipt may go without.',
+  'too long': (data) => `more than ${formatUnits(Number(data.most))} characters.`,
+  'not plain text': () => 'signs that cannot be printed.',
   'site unknown': (data) => `“${said(data)}” is no site of the book.`,
   'same site': (data) => `“${said(data)}” is where it left from as well.`,
   'type unknown': (data) => `“${said(data)}” is no container type of the book.`,
@@ -34,10 +34,10 @@ const reasons: Record<RowReason, (data: Data) => string> = {
   'not a number': (data) => `“${said(data)}” is no whole number. Write 1000, without signs between.`,
   negative: (data) => `${said(data)} is below 0.`,
   fraction: (data) => `${said(data)} is not whole.`,
-  'nothing declared': () => 'is 0: a shipment declares at least 1.',
+  'nothing declared': () => '0. A shipment declares at least 1.',
   'too many units': (data) => `${said(data)} is more than one row can hold.`,
   'more than counted': (data) => `${said(data)} is more than the ${said(data, 'counted')} that were counted.`,
-  'only for receipts': () => 'belongs to receipts. Leave it empty here.',
+  'only for receipts': () => 'for receipts only. Leave it empty here.',
   'same reference, other shipment': (data) =>
     `“${said(data)}” stands in row ${said(data, 'row')} with another site or day.`,
   'type twice': (data) => `“${said(data)}” stands in row ${said(data, 'row')} of this shipment already.`,
@@ -169,7 +169,7 @@ export const imports = {
   },
   dropped: 'This file was put aside. Nothing of it was posted.',
   result: {
-    lead: (by: string, when: string) => `Confirmed by ${by}, posted by ${when}.`,
+    lead: (by: string, when: string) => `Confirmed by ${by}. Posted ${when}.`,
     shipmentsHead: 'Shipments of the file',
     posted: 'New in the book',
     known: 'In the book already, alike',
@@ -210,7 +210,7 @@ export const imports = {
     head: 'Suggestions',
     lead: 'Receipts and shipments that may belong together. Accepting one counts its shipment.',
     score: (share: string) => `${share} likely`,
-    choose: (reference: string, receipt: string) => `${reference} with ${receipt}`,
+    choose: (shipment: string, receipt: string) => `${shipment} with ${receipt}`,
     accept: (count: number) => (count === 0 ? 'Accept' : `Accept ${formatUnits(count)}`),
     refuse: (count: number) => (count === 0 ? 'Refuse' : `Refuse ${formatUnits(count)}`),
     chooseFirst: 'Choose one or more.',
@@ -257,5 +257,6 @@ export const imports = {
     conflict: 'The book holds this reference with other contents, sites or day.',
     empty: { title: 'No shipments of this kind' },
   },
+  oneHead: 'The import',
   receiptOf: (day: string) => `the receipt of ${formatDay(day, 'date')}`,
 } as const;

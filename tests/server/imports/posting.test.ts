@@ -175,7 +175,9 @@ describe('what the receipts of a file match', () => {
     const id = await scene.bringIn([aShipment(), aReceipt(), aReceipt()]);
     expect(await numbersOf(id)).toMatchObject({ duplicates: 1, unannounced: 0 });
     const { body } = await scene.coordinator.get(`/imports/${id}/receipts`, { state: 'duplicate' });
-    expect(body.rows).toMatchObject([{ rowNo: 4, first: { reference: 'EM-1001', rowNo: 3 } }]);
+    expect(body.rows).toMatchObject([
+      { rowNo: 4, first: { reference: 'EM-1001', rowNo: 3 }, shipment: { reference: 'EM-1001' } },
+    ]);
     expect(await rowsIn(scene.product, 'counts')).toBe(1);
   });
 
@@ -243,5 +245,45 @@ describe('a posting that is killed', () => {
       state: 'done',
       progress: { done: 121, of: 121 },
     });
+  });
+
+  it('that gave up is told as broken off, and goes on when it is asked to', async () => {
+    const { body } = await scene.upload(csvOf(month()));
+    const path = `/imports/${body.id}`;
+    await scene.coordinator.post(`${path}/confirmation`, { leaveOut: 0 });
+    const { deps } = scene.product;
+    const [job] = await deps.db.select().from(jobs);
+    if (!job) throw new Error('no job was queued');
+    const lastTry = runImport(deps, { ...job, attempts: 5 }, () => Promise.reject(new Error('killed')));
+    await expect(lastTry).rejects.toThrow('killed');
+    await deps.db.update(jobs).set({ state: 'failed' });
+    expect((await scene.coordinator.get(path)).body).toMatchObject({ state: 'failed', broken: true });
+    await scene.coordinator.post(`${path}/confirmation`, { leaveOut: 0 });
+    await scene.product.runJobs();
+    expect((await scene.coordinator.get(path)).body.state).toBe('done');
+    expect(await rowsIn(scene.product, 'shipments')).toBe(60);
+    expect(await rowsIn(scene.product, 'counts')).toBe(60);
+  });
+});
+
+describe('two files at once', () => {
+  it('that hold the same shipments and receipts post each once', async () => {
+    const rows = [...Array(25)].flatMap((_, at) => [
+      aShipment({ reference: `T-${at}`, units: 20 + at }),
+      aReceipt({ reference: `T-${at}`, units: 20 + at }),
+    ]);
+    const ids: string[] = [];
+    for (const name of ['a.csv', 'b.csv']) {
+      const { body } = await scene.upload(csvOf(rows), name);
+      await scene.coordinator.post(`/imports/${body.id}/confirmation`, { leaveOut: 0 });
+      ids.push(body.id);
+    }
+    await Promise.all([scene.product.runJobs(), scene.product.runJobs()]);
+    await scene.product.runJobs();
+    expect(await rowsIn(scene.product, 'shipments')).toBe(25);
+    expect(await rowsIn(scene.product, 'counts')).toBe(25);
+    expect(await rowsIn(scene.product, 'ledger_entries')).toBe(50);
+    const states = await Promise.all(ids.map((id) => scene.coordinator.get(`/imports/${id}`)));
+    expect(states.map(({ body }) => body.state)).toEqual(['done', 'done']);
   });
 });

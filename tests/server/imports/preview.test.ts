@@ -9,6 +9,8 @@ afterAll(() => scene.product.close());
 
 const good = [aShipment(), aShipment({ type: 'LID-128', units: 20 }), aReceipt({ units: 392, damaged: 3 })];
 
+type Wrong = { column: string; reason: string; what: string; wrong: Partial<MonthRow> };
+
 async function previewOf(rows: readonly MonthRow[]) {
   const { body } = await scene.upload(csvOf(rows));
   const read = await scene.coordinator.get(`/imports/${body.id}/rows`);
@@ -57,28 +59,53 @@ describe('the preview of a file', () => {
     expect(page.body.rows[0].cells).toMatchObject({ reference: 'EM-7', type: 'tote-64', date: '2.3.2026' });
   });
 
-  it.each<[string, string, string, Partial<MonthRow>]>([
-    ['side', 'empty', 'a row without a side', { side: '' as 'shipment' }],
-    ['side', 'side unknown', 'another side', { side: 'sent' as 'shipment' }],
-    ['reference', 'reference missing', 'a shipment without a reference', { reference: '' }],
-    ['reference', 'too long', 'a reference of 41 characters', { reference: 'R'.repeat(41) }],
-    ['from', 'site unknown', 'an unknown site', { from: 'NOWHERE' }],
-    ['to', 'same site', 'the same site twice', { to: 'TARNBY' }],
-    ['date', 'not a day', '30 February', { date: '30.2.2026' }],
-    ['date', 'not a day', 'a day in another writing', { date: '03/02/2026' }],
-    ['date', 'future', 'a day to come', { date: '2026-03-21' }],
-    ['date', 'month closed', 'a day in a closed month', { date: '2026-01-15' }],
-    ['type', 'type unknown', 'an unknown type', { type: 'CRATE-9' }],
-    ['type', 'no terms', 'a type the receiver has no terms for', { type: 'RACK-CP' }],
-    ['units', 'empty', 'no units', { units: '' }],
-    ['units', 'negative', 'negative units', { units: -4 }],
-    ['units', 'fraction', 'fractional units', { units: '12.5' }],
-    ['units', 'not a number', 'units in words', { units: 'many' }],
-    ['units', 'not a number', 'units with a sign between', { units: '1.000' }],
-    ['units', 'too many units', 'more units than a row can hold', { units: 1_000_000_001 }],
-    ['units', 'nothing declared', 'a shipment of nothing', { units: 0 }],
-    ['damaged', 'only for receipts', 'damage on a shipment', { damaged: 2 }],
-  ])('names row 3 and the column %s with "%s" for %s', async (column, reason, _case, wrong) => {
+  it.each<Wrong>([
+    { column: 'side', reason: 'empty', what: 'a row without a side', wrong: { side: '' as 'shipment' } },
+    { column: 'side', reason: 'side unknown', what: 'another side', wrong: { side: 'sent' as 'shipment' } },
+    {
+      column: 'reference',
+      reason: 'reference missing',
+      what: 'a shipment without a reference',
+      wrong: { reference: '' },
+    },
+    {
+      column: 'reference',
+      reason: 'too long',
+      what: 'a reference of 41 characters',
+      wrong: { reference: 'R'.repeat(41) },
+    },
+    { column: 'from', reason: 'site unknown', what: 'an unknown site', wrong: { from: 'NOWHERE' } },
+    { column: 'to', reason: 'same site', what: 'the same site twice', wrong: { to: 'TARNBY' } },
+    { column: 'date', reason: 'not a day', what: '30 February', wrong: { date: '30.2.2026' } },
+    { column: 'date', reason: 'not a day', what: 'a day in another writing', wrong: { date: '03/02/2026' } },
+    { column: 'date', reason: 'future', what: 'a day to come', wrong: { date: '2026-03-21' } },
+    {
+      column: 'date',
+      reason: 'month closed',
+      what: 'a day in a closed month',
+      wrong: { date: '2026-01-15' },
+    },
+    { column: 'type', reason: 'type unknown', what: 'an unknown type', wrong: { type: 'CRATE-9' } },
+    {
+      column: 'type',
+      reason: 'no terms',
+      what: 'a type the receiver has no terms for',
+      wrong: { type: 'RACK-CP' },
+    },
+    { column: 'units', reason: 'empty', what: 'no units', wrong: { units: '' } },
+    { column: 'units', reason: 'negative', what: 'negative units', wrong: { units: -4 } },
+    { column: 'units', reason: 'fraction', what: 'fractional units', wrong: { units: '12.5' } },
+    { column: 'units', reason: 'not a number', what: 'units in words', wrong: { units: 'many' } },
+    { column: 'units', reason: 'not a number', what: 'units with a sign between', wrong: { units: '1.000' } },
+    {
+      column: 'units',
+      reason: 'too many units',
+      what: 'more units than a row can hold',
+      wrong: { units: 1_000_000_001 },
+    },
+    { column: 'units', reason: 'nothing declared', what: 'a shipment of nothing', wrong: { units: 0 } },
+    { column: 'damaged', reason: 'only for receipts', what: 'damage on a shipment', wrong: { damaged: 2 } },
+  ])('names row 3 and the column $column with "$reason" for $what', async ({ column, reason, wrong }) => {
     await scene.product.deps.pool.query(
       "INSERT IGNORE INTO months (month, state) VALUES ('2026-01', 'closed')",
     );
