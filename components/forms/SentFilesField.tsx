@@ -17,12 +17,13 @@ type Props = {
   label: string;
   hint?: string;
   kind?: 'photo' | 'paper';
+  hideLabel?: boolean;
   /** Whether a file is under way or did not arrive: the form is not sent without it. */
   onUnsent: (unsent: boolean) => void;
 };
 
 /** Files that are sent as they are picked: what is with the server survives a reload with the rest of the form. */
-export function SentFilesField({ name, label, hint, kind = 'paper', onUnsent }: Props) {
+export function SentFilesField({ name, label, hint, kind = 'paper', hideLabel = false, onUnsent }: Props) {
   const field = useField<SentFile[]>(name, label);
   const kept = field.value ?? [];
   const { getValues } = useFormContext();
@@ -47,6 +48,7 @@ export function SentFilesField({ name, label, hint, kind = 'paper', onUnsent }: 
       <FileInput
         id={field.id}
         label={label}
+        hideLabel={hideLabel}
         {...(hint === undefined ? {} : { hint })}
         error={field.error}
         kind={kind}
@@ -64,13 +66,13 @@ function Going({ sending }: { sending: ReturnType<typeof useSentFiles> }) {
     <>
       {sending.isGoing ? (
         <Text variant="soft" role="status">
-          {text.disputes.files.going}
+          {text.ui.filesGoing}
         </Text>
       ) : null}
       {sending.failed.length > 0 ? (
         <Notice kind="error">
           {sending.failed.map(({ file, key, problem }) => (
-            <Text key={key}>{`${text.disputes.files.notSent(file.name)} ${problem ?? ''}`}</Text>
+            <Text key={key}>{`${text.ui.fileNotSent(file.name)} ${problem ?? ''}`}</Text>
           ))}
           <Button kind="secondary" label={text.ui.tryAgain} onPress={sending.sendAgain} />
         </Notice>

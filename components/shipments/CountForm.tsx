@@ -6,6 +6,7 @@ import { text } from '@/shared/text/catalogue';
 import { isPassing, ProblemError } from '../data/problem-error';
 import { usePost, useRead } from '../data/use-operation';
 import { FormFrame } from '../forms/FormFrame';
+import { SentFilesField } from '../forms/SentFilesField';
 import { TextAreaField } from '../forms/text-fields';
 import { useDraftForm } from '../forms/use-draft-form';
 import { Box } from '../ui/Box';
@@ -14,8 +15,6 @@ import { AddType } from './AddType';
 import { CountedAlready } from './CountedAlready';
 import { type CountDraft, countDraft, emptyCount, isCounted, type TypedLine } from './count-draft';
 import { CountLine, type LineToCount } from './CountLine';
-import { PhotosField } from './PhotosField';
-import { usePhotos } from './use-photos';
 
 const words = text.shipments;
 
@@ -30,9 +29,7 @@ export function CountForm({ shipment, onSent }: Props) {
     defaultValues: emptyCount(shipment),
   });
   const { send, unsent, counted } = useSendCount(shipment.id, onSent);
-  const photos = usePhotos((photo) =>
-    draft.form.setValue('photos', [...draft.form.getValues('photos'), photo], { shouldDirty: true }),
-  );
+  const [photosUnsent, setPhotosUnsent] = useState(false);
   const lines = (useWatch({ control: draft.form.control, name: 'lines' }) ?? []) as TypedLine[];
   const left = lines.filter((line) => !isCounted(line)).length;
   return (
@@ -42,12 +39,19 @@ export function CountForm({ shipment, onSent }: Props) {
       onSubmit={send}
       submitLabel={unsent ? words.sendAgain : words.sendCount}
       inBar
-      disabled={left > 0 || photos.isGoing || photos.failed.length > 0}
+      disabled={left > 0 || photosUnsent}
       note={<BarNote left={left} of={lines.length} unsent={unsent} />}
     >
       {counted ? <CountedAlready {...counted} shipment={shipment} /> : null}
       <Lines draft={draft} lines={lines} shipment={shipment} />
-      <PhotosField photos={photos} />
+      <SentFilesField
+        name="photos"
+        label={words.photos}
+        hideLabel
+        hint={words.photosHint}
+        kind="photo"
+        onUnsent={setPhotosUnsent}
+      />
       <TextAreaField name="note" label={words.countNote} optional />
     </FormFrame>
   );

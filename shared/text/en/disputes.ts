@@ -224,10 +224,6 @@ export const disputes = {
     backToShipment: (reference: string) => `Shipment ${reference}`,
     backToStatement: (month: string) => `Statement, ${formatMonth(month)}`,
   },
-  files: {
-    going: 'Sending the file …',
-    notSent: (name: string) => `${name} did not arrive.`,
-  },
   mail: {
     subject: 'A dispute has moved on',
     news: 'There is news in a dispute. Read the thread and answer here:',

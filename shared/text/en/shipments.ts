@@ -130,8 +130,6 @@ export const shipments = {
   countSentDiffersOperator: 'What differs stands in the list of differences now.',
   countedAlready: 'This shipment is counted',
   notYours: 'Only the receiver counts a shipment.',
-  photoNotSent: (name: string) => `${name} was not sent. Remove it or try again.`,
-  photosGoing: 'Photos are being sent.',
   moreDamaged: 'More damaged than counted.',
   moreDirty: 'More to clean than counted.',
 

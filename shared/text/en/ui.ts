@@ -18,6 +18,8 @@ export const ui = {
   addPhoto: '+ photo',
   addPaper: '+ paper',
   addFile: '+ file',
+  filesGoing: 'Files are being sent.',
+  fileNotSent: (name: string) => `${name} was not sent. Remove it or try again.`,
   removeFile: (name: string) => `Remove ${name}`,
   fileTooLarge: (name: string, most: string) => `${name} is larger than ${most}, so it was not added.`,
   fileNotTaken: (name: string) => `${name} is not a photo or a PDF, so it was not added.`,
