@@ -26,10 +26,15 @@ journey(
   'a negative and a fractional count are refused at their field, and what was typed stays',
   async (theatre) => {
     const { inge, shipment } = await openedCount(theatre);
-    for (const typed of ['-5', '3.5', 'many']) {
+    const notWhole = 'Write a whole number, like 392.';
+    for (const [typed, said] of [
+      ['-5', 'Not below 0.'],
+      ['3.5', notWhole],
+      ['many', notWhole],
+    ] as const) {
       await inge.write(`${tote}, counted`, typed);
       await inge.press('Send count');
-      await inge.sees('Write a whole number, like 392.');
+      await inge.sees(said);
       expect(await inge.field(`${tote}, counted`).inputValue()).toBe(typed);
     }
     await inge.isInOrder();
