@@ -1,8 +1,12 @@
 import { customType } from 'drizzle-orm/mysql-core';
 
+/** MariaDB fails on a comparison of an ASCII column with other text; with a "?" in it such text fits nothing. */
+const inAscii = (value: string): string => value.replace(/[^\x20-\x7e]/g, '?');
+
 /** Time-ordered UUID as text. */
-export const id = customType<{ data: string }>({
+export const id = customType<{ data: string; driverData: string }>({
   dataType: () => 'char(36) character set ascii collate ascii_bin',
+  toDriver: inAscii,
 });
 
 /** A code that differs by case: the default collation would call "a1" and "A1" the same. */
@@ -14,8 +18,9 @@ export const code = customType<{ data: string; config: { length: number }; confi
 export const day = customType<{ data: string }>({ dataType: () => 'date' });
 
 /** 'YYYY-MM'. */
-export const month = customType<{ data: string }>({
+export const month = customType<{ data: string; driverData: string }>({
   dataType: () => 'char(7) character set ascii collate ascii_bin',
+  toDriver: inAscii,
 });
 
 /** Whole units; signed, since UNSIGNED minus a larger number is an error. Safe integers only. */

@@ -1,4 +1,14 @@
-import { foreignKey, index, int, mysqlTable, primaryKey, uniqueIndex, varchar } from 'drizzle-orm/mysql-core';
+import { sql } from 'drizzle-orm';
+import {
+  boolean,
+  foreignKey,
+  index,
+  int,
+  mysqlTable,
+  primaryKey,
+  uniqueIndex,
+  varchar,
+} from 'drizzle-orm/mysql-core';
 import { code, day, id, instant, units } from '../columns';
 import { companies, people, sites } from './companies';
 import { containerTypes } from './containers';
@@ -35,6 +45,10 @@ export const shipments = mysqlTable(
     countedAt: instant('counted_at'),
     countedOn: day('counted_on'),
     countedBy: id('counted_by').references(() => people.id),
+    /** Longer on the way than most: with it, what was on the way on a past day is found without reading the history. */
+    isSlow: boolean('is_slow').generatedAlwaysAs(sql`(datediff(counted_on, left_on) > 14)`, {
+      mode: 'virtual',
+    }),
   },
   (table) => [
     uniqueIndex('shipments_reference').on(table.fromCompanyId, table.reference),
@@ -42,6 +56,7 @@ export const shipments = mysqlTable(
     index('shipments_from').on(table.fromCompanyId, table.state, table.expectedOn, table.id),
     index('shipments_left').on(table.leftOn, table.id),
     index('shipments_counted').on(table.countedOn, table.leftOn),
+    index('shipments_slow').on(table.isSlow, table.countedOn, table.leftOn),
     index('shipments_state').on(table.state, table.expectedOn, table.id),
   ],
 );

@@ -61,7 +61,7 @@ async function fill(
 const asked = (scene: Scene) => ({
   'a page of shipments': (caller: Caller) => caller.get('/shipments', { limit: '50' }),
   'balances today': (caller: Caller) => caller.get('/balances'),
-  'balances a year ago': (caller: Caller) => caller.get('/balances', { on: '2025-03-01' }),
+  'balances a year ago': (caller: Caller) => caller.get('/balances', { asOf: '2025-03-01' }),
   'a posting': (caller: Caller) =>
     caller.post('/shipments', {
       fromSiteId: scene.plant,

@@ -10,11 +10,19 @@ export function netsOf(asOf: string | undefined): { table: SQL; units: SQL; unti
     : { table: sql`daily_nets`, units: sql`n.net`, until: sql`n.day <= ${asOf}` };
 }
 
-/** Shipments that had left and were not counted at the end of the day. */
+/**
+ * Shipments that had left and were not counted at the end of the day. Of the past they are looked for among those that
+ * left in the two weeks before, those that are known to have been slower (is_slow), and those still on the way: each
+ * found by an index of its own, so that the length of the history does not count.
+ */
 export function onTheWay(asOf: string | undefined): SQL {
-  return asOf === undefined
-    ? sql`s.state = 'on the way'`
-    : sql`s.left_on <= ${asOf} and (s.counted_on is null or s.counted_on > ${asOf})`;
+  if (asOf === undefined) return sql`s.state = 'on the way'`;
+  const quick = sql`date_sub(${asOf}, interval 14 day)`;
+  return sql`s.id in (select c.id from (
+      select id from shipments where state = 'on the way' and left_on <= ${asOf}
+      union all select id from shipments where left_on > ${quick} and left_on <= ${asOf} and counted_on > ${asOf}
+      union all select id from shipments where is_slow = 1 and counted_on > ${asOf} and left_on <= ${quick}
+    ) c)`;
 }
 
 /**

@@ -72,6 +72,17 @@ describe('balances', () => {
     expect(await asOf('2026-03-20')).toEqual(await figures(lane.coordinator, lane.partner));
   });
 
+  it('of an earlier day know what was long on the way then', async () => {
+    const form = { ...empties(lane, load(9)), leftOn: '2026-02-10' };
+    const { body } = await lane.coordinator.post('/shipments', form);
+    await lane.clerk.post(`/shipments/${body.id}/counts`, counted(load(9)));
+    const asOf = (day: string) => figures(lane.coordinator, lane.partner, { asOf: day });
+    expect(await asOf('2026-02-09')).toEqual(none);
+    expect(await asOf('2026-03-01')).toEqual({ ...none, toIt: 9 });
+    expect(await asOf('2026-03-19')).toEqual({ ...none, toIt: 9 });
+    expect(await asOf('2026-03-20')).toEqual({ ...none, atSites: 9, held: 9 });
+  });
+
   it('change from the value date on, and on no day before it, when an entry is dated back', async () => {
     const days = ['2026-03-04', '2026-03-05', '2026-03-06', '2026-03-20'];
     const all = () => Promise.all(days.map((asOf) => figures(lane.coordinator, lane.operator, { asOf })));

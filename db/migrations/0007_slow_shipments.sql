@@ -1,0 +1,2 @@
+ALTER TABLE `shipments` ADD `is_slow` boolean GENERATED ALWAYS AS ((datediff(counted_on, left_on) > 14)) VIRTUAL;--> statement-breakpoint
+CREATE INDEX `shipments_slow` ON `shipments` (`is_slow`,`counted_on`,`left_on`);
