@@ -144,7 +144,7 @@ export const imports = {
     leaveOut: (bad: number) => `Leave out ${rows(bad)}`,
     leaveOutHint: 'They are not posted, now or later, unless you bring them in again.',
     confirm: (good: number) => `Post ${rows(good)}`,
-    sayFirst: (bad: number) => `Say first that ${rows(bad)} are left out.`,
+    sayFirst: (bad: number) => `Say first that you leave out ${rows(bad)}.`,
     drop: 'Put the file aside',
     rowsHead: 'Rows',
     only: 'Show',
