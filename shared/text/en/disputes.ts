@@ -1,5 +1,4 @@
 import type { DisputeReason, DisputeRow, DisputeState, LineSubject } from '../../contracts/disputes';
-import type { LineComponent } from '../../domain/statement/components';
 import { formatDay, formatMoney, formatMonth, formatUnits } from '../format';
 import { plural } from '../plural';
 import { statements } from './statements';
@@ -11,17 +10,6 @@ const reasons: Record<DisputeReason, string> = {
   'arrived damaged': 'They arrived damaged',
   'wrong rate': 'The rate is not the agreed one',
   other: 'Something else',
-};
-
-const components: Record<LineComponent, string> = {
-  'deposits asked': 'Deposits asked',
-  'deposits released': 'Deposits released',
-  'daily fee': 'Daily fee',
-  lost: 'Lost',
-  'found again': 'Found again',
-  damage: 'Damage',
-  cleaning: 'Cleaning',
-  credit: 'Credit',
 };
 
 const states: Record<DisputeState, string> = {
@@ -43,7 +31,6 @@ export const disputes = {
   yourCompany: 'Your company',
   acceptedReason: 'Accepted as the partner said',
   reasons,
-  components,
   states,
   days,
   gap,
@@ -93,7 +80,7 @@ export const disputes = {
   },
   about: (row: DisputeRow) => {
     if (row.subject === 'count') return `Count of ${row.reference ?? ''}`;
-    const what = row.component ? components[row.component] : '';
+    const what = row.component ? statements.component[row.component] : '';
     return `${what}, ${row.statementMonth ? formatMonth(row.statementMonth) : ''}`;
   },
   claim: (row: DisputeRow) => {
@@ -210,7 +197,7 @@ export const disputes = {
     lane: (from: string, to: string) => `${from} → ${to}`,
     line: (it: LineSubject) => {
       const quantity = it.way === null ? '' : `: ${statements.unitsOfKind(it.quantity, it.typeKind ?? '')}`;
-      return `${components[it.component]}${quantity}`;
+      return `${statements.component[it.component]}${quantity}`;
     },
     unitDays: (quantity: number) => `${formatUnits(quantity)} unit-days`,
     already: 'This is in dispute already.',
