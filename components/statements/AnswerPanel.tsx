@@ -5,6 +5,7 @@ import { Box } from '../ui/Box';
 import { Card } from '../ui/Card';
 import { Disclosure } from '../ui/Disclosure';
 import { ButtonLink } from '../ui/Link';
+import { NotPrinted } from '../ui/NotPrinted';
 import { Tag } from '../ui/Tag';
 import { Text } from '../ui/Text';
 import type { StatementPage } from './StatementScreen';
@@ -59,7 +60,9 @@ function Disputed({ dispute, timeZone }: DisputedProps) {
         <Text>{dispute.words}</Text>
       </Box>
       {dispute.undecided ? null : <Tag tone="done" label={dispute.state} />}
-      <ButtonLink href={`/disputes/${dispute.id}`} label={words.openDispute} kind="secondary" full />
+      <NotPrinted>
+        <ButtonLink href={`/disputes/${dispute.id}`} label={words.openDispute} kind="secondary" full />
+      </NotPrinted>
     </Box>
   );
 }

@@ -1,6 +1,7 @@
 import { compare } from '@/shared/domain/money';
 import { text } from '@/shared/text/catalogue';
 import { formatMoney } from '@/shared/text/format';
+import { useIsWide } from '../theme/use-breakpoint';
 import { Box } from '../ui/Box';
 import { Figure } from '../ui/Figure';
 import { Text } from '../ui/Text';
@@ -11,8 +12,9 @@ const words = text.statements.page;
 /** The figure that matters, and what of the statement is held back while it is disputed. */
 export function DueNow({ page }: { page: StatementPage }) {
   const { state, dueNow, held, currency } = page;
+  const wide = useIsWide();
   return (
-    <Box gap="xs" align="end">
+    <Box gap="xs" align={wide ? 'end' : 'start'}>
       <Text variant="soft">{state === 'draft' ? words.wouldBeDue : words.dueNow}</Text>
       <Figure money={dueNow} currency={currency} size="figure" />
       {compare(held, '0') === 0 ? null : (

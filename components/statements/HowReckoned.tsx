@@ -46,11 +46,14 @@ function Group({ page, group }: { page: StatementPage; group: LineGroup }) {
 
 function WorkedLine({ page, line, title }: { page: StatementPage; line: ContentLine; title: string }) {
   const name = page.content.types.find((type) => type.code === line.typeCode)?.name ?? line.typeCode ?? '';
+  const sum = line.credit
+    ? `${line.credit.reason}: ${formatAmount(line.amount, page.currency)}`
+    : workedOut(line, page.content);
   return (
-    <Box gap="xs" align="start">
-      <Text>{`${name}: ${line.credit ? `${line.credit.reason}: ${formatAmount(line.amount, page.currency)}` : workedOut(line, page.content)}`}</Text>
+    <Box row wrap gap="l">
+      <Text>{name === '' ? sum : `${name}: ${sum}`}</Text>
       <DisputeTags page={page} lines={[line]} />
-      <Box row wrap gap="l">
+      <Box row gap="l">
         {line.credit ? null : (
           <Link
             href={movementsHref(page.id, { line: line.id })}

@@ -3,6 +3,7 @@ import { text } from '@/shared/text/catalogue';
 import { Problem } from '../data/Problem';
 import { urlOf } from '../data/url-of';
 import { usePost } from '../data/use-operation';
+import { useIsWide } from '../theme/use-breakpoint';
 import { announce } from '../ui/Announcer';
 import { Box } from '../ui/Box';
 import { Button } from '../ui/Button';
@@ -13,15 +14,15 @@ import type { StatementPage } from './StatementScreen';
 
 const words = text.statements.page;
 
-/** The one thing that this person can do now, then the spreadsheet and paper. */
+/** The spreadsheet and paper; from 900 px on with the main action above them, which a phone has in its bar. */
 export function StatementActions({ page }: { page: StatementPage }) {
+  const wide = useIsWide();
   const params = { statement: page.id };
   const acts = page.mayIssue || page.mayConfirm;
   return (
     <NotPrinted>
       <Box gap="m" align="stretch">
-        {page.mayIssue ? <Issue statement={page.id} /> : null}
-        {page.mayConfirm ? <Confirm statement={page.id} /> : null}
+        {wide ? <MainAction page={page} /> : null}
         <DownloadLink
           href={urlOf(downloadStatement, { params })}
           label={words.download}
@@ -32,6 +33,12 @@ export function StatementActions({ page }: { page: StatementPage }) {
       </Box>
     </NotPrinted>
   );
+}
+
+/** The one thing that this person can do with the statement now. */
+export function MainAction({ page }: { page: StatementPage }) {
+  if (page.mayIssue) return <Issue statement={page.id} />;
+  return page.mayConfirm ? <Confirm statement={page.id} /> : null;
 }
 
 function Issue({ statement }: { statement: string }) {

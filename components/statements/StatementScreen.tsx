@@ -5,6 +5,7 @@ import { text } from '@/shared/text/catalogue';
 import { formatMonth } from '@/shared/text/format';
 import { Problem } from '../data/Problem';
 import { usePost, useRead } from '../data/use-operation';
+import { useIsWide } from '../theme/use-breakpoint';
 import { Card } from '../ui/Card';
 import { Page } from '../ui/Page';
 import { Skeleton } from '../ui/Skeleton';
@@ -12,7 +13,7 @@ import { AnswerPanel } from './AnswerPanel';
 import { ContainersSheet } from './ContainersSheet';
 import { DueNow } from './DueNow';
 import { MoneySheet } from './MoneySheet';
-import { StatementActions } from './StatementActions';
+import { MainAction, StatementActions } from './StatementActions';
 import { StillOpen } from './StillOpen';
 import { TaxSheet } from './TaxSheet';
 
@@ -23,6 +24,8 @@ export type StatementPage = AnswerOf<typeof readStatement>;
 export function StatementScreen({ statement }: { statement: string }) {
   const { data, error, refetch } = useRead(readStatement, { params: { statement } });
   useOpening(data);
+  const wide = useIsWide();
+  const acts = data?.mayIssue || data?.mayConfirm;
   const back = { href: '/statements', label: text.statements.head };
   if (!data) {
     return (
@@ -37,6 +40,7 @@ export function StatementScreen({ statement }: { statement: string }) {
       kicker={words.kicker(data.number, data.partner.name)}
       back={back}
       beside={<DueNow page={data} />}
+      {...(!wide && acts ? { action: <MainAction page={data} /> } : {})}
       aside={
         <>
           <StatementActions page={data} />

@@ -1,6 +1,6 @@
 import { add, multiply } from '@/shared/domain/money';
 import { text } from '@/shared/text/catalogue';
-import { formatAmount, formatDay, formatDecimal, formatMoney, formatUnits } from '@/shared/text/format';
+import { formatAmount, formatDay, formatMoney, formatUnits } from '@/shared/text/format';
 import { Card } from '../ui/Card';
 import { Disclosure } from '../ui/Disclosure';
 import { Link } from '../ui/Link';
@@ -65,7 +65,7 @@ function Worked({ version, currency }: { version: Version; currency: string }) {
       <Text>
         {free
           ? words.example.noFee
-          : words.example.fee(freeDays, formatDecimal(dailyFee), money(multiply(dailyFee, 10)))}
+          : words.example.fee(freeDays, formatAmount(dailyFee, currency), money(multiply(dailyFee, 10)))}
       </Text>
       <Text>{words.example.loss(money(floor), money(replacement), money(deposit))}</Text>
     </Disclosure>
@@ -96,13 +96,13 @@ function columnsIn(currency: string): SheetColumn<Version>[] {
     figures('deposit', (version) => formatAmount(version.deposit, currency)),
     figures('replacement', (version) => formatAmount(version.replacement, currency)),
     figures('freeDays', (version) => formatUnits(version.freeDays)),
-    figures('dailyFee', (version) => formatDecimal(version.dailyFee)),
+    figures('dailyFee', (version) => formatAmount(version.dailyFee, currency)),
     figures('lostAfterDays', ({ lostAfterDays }) =>
       lostAfterDays === null ? words.never : words.days(lostAfterDays),
     ),
     figures('residual', (version) => words.life(version.usefulLifeMonths, version.residualFloorPct)),
-    figures('damageFee', (version) => formatDecimal(version.damageFee)),
-    figures('cleaningFee', (version) => formatDecimal(version.cleaningFee)),
+    figures('damageFee', (version) => formatAmount(version.damageFee, currency)),
+    figures('cleaningFee', (version) => formatAmount(version.cleaningFee, currency)),
     figures('recoveryDays', (version) => words.days(version.recoveryDays)),
   ];
 }

@@ -1,7 +1,7 @@
 import type { AssessmentTerms } from '../domain/assessment';
 import { compare, multiply, roundToMinor } from '../domain/money';
 import type { ContentLine } from '../domain/statement/content';
-import { formatAmount, formatDecimal, formatUnits } from './format';
+import { formatAmount, formatUnits } from './format';
 import { statements as words } from './en/statements';
 
 export type WordContext = {
@@ -49,7 +49,7 @@ export function workedOut(line: ContentLine, context: WordContext): string {
     );
   }
   if (line.rate !== null) {
-    return words.worked.fee(formatUnits(line.quantity), formatDecimal(line.rate), amount(line.amount));
+    return words.worked.fee(formatUnits(line.quantity), amount(line.rate), amount(line.amount));
   }
   if (line.parts.length === 0) return `${unitsOf(line, context)}: ${amount(line.amount)}`;
   return line.parts
@@ -73,7 +73,11 @@ const byComponent: Record<ContentLine['component'], Words> = {
   },
   'deposits released': (line, context) => words.reckoned.released(unitsOf(line, context)),
   'daily fee': (line, context) =>
-    words.reckoned.fee(line.quantity, line.rate ?? '0', freeDaysOf(line, context.terms)),
+    words.reckoned.fee(
+      line.quantity,
+      formatAmount(line.rate ?? '0', context.currency),
+      freeDaysOf(line, context.terms),
+    ),
   lost: (line, context) =>
     line.parts.length === 0
       ? words.reckoned.lost(unitsOf(line, context))

@@ -5,7 +5,7 @@ import { differences, disputes } from '@/db/schema/differences';
 import { partnerEvents } from '@/db/schema/ledger';
 import type { OpenItem } from '@/shared/contracts/months';
 import { lastDayOfMonth } from '@/shared/domain/calendar';
-import { roundToMinor } from '@/shared/domain/money';
+import { isZero, roundToMinor } from '@/shared/domain/money';
 import { plain } from '../statements/assessment-input';
 import { undecided } from '../statements/held';
 import { uncountedByPartner } from './uncounted';
@@ -31,7 +31,10 @@ function itemOf(kind: OpenItem['kind'], row: Row): OpenItem {
     kind,
     partner: { id, name },
     count: row.count,
-    money: row.amount === null ? null : { currency, amount: roundToMinor(plain(row.amount), currency) },
+    money:
+      row.amount === null || isZero(plain(row.amount))
+        ? null
+        : { currency, amount: roundToMinor(plain(row.amount), currency) },
     typeCode: null,
   };
 }

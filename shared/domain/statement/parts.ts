@@ -66,26 +66,45 @@ function spells(known: Known, { from, to }: Assessment): Spell[] {
 }
 
 /**
- * Losses by the day, those of one figure together. Only where all terms of the type agree on what a loss costs and
- * every lost unit carried that deposit: else units of one day may differ, and nothing is said for certain.
+ * Losses by the day, those of one figure together. Only where the lost units of a day must all have carried one
+ * deposit and the terms with that deposit agree on what a loss costs: else nothing is said for certain.
  */
 function lossParts(_charge: Charge, { known, assessment }: Frame): Part[] {
-  const [first] = known.terms;
-  if (!first || known.terms.some((terms) => !costsTheSame(terms, first))) return [];
   const { currency } = known;
-  const deposit = toMinor(first.deposit, currency);
-  const byEach = new Map<bigint, number>();
-  for (const { units, charged, forfeited } of lossDays(known, assessment)) {
-    const count = BigInt(units);
-    if (forfeited !== deposit * count || charged === BigInt(0) || charged % count !== BigInt(0)) return [];
-    byEach.set(charged / count, (byEach.get(charged / count) ?? 0) + units);
+  const parts = new Map<string, Part>();
+  for (const day of lossDays(known, assessment)) {
+    const deposit = oneDeposit(known, day);
+    const count = BigInt(day.units);
+    if (deposit === null || day.charged === BigInt(0) || day.charged % count !== BigInt(0)) return [];
+    const each = day.charged / count;
+    const key = `${each} ${deposit}`;
+    parts.set(key, {
+      quantity: (parts.get(key)?.quantity ?? 0) + day.units,
+      each: fromMinor(each, currency),
+      residual: fromMinor(each + deposit, currency),
+      deposit: fromMinor(deposit, currency),
+    });
   }
-  return [...byEach].map(([each, quantity]) => ({
-    quantity,
-    each: fromMinor(each, currency),
-    residual: fromMinor(each + deposit, currency),
-    deposit: fromMinor(deposit, currency),
-  }));
+  return [...parts.values()];
+}
+
+/**
+ * The deposit, in minor units, that every unit lost on the day carried. An average equal to the least or the
+ * greatest deposit that a unit can have carried leaves no room for a mixture; any other average does.
+ */
+function oneDeposit(known: Known, { units, forfeited }: LossDay): bigint | null {
+  const count = BigInt(units);
+  if (forfeited % count !== BigInt(0)) return null;
+  const average = forfeited / count;
+  const minor = (terms: AssessmentTerms) => toMinor(terms.deposit, known.currency);
+  // Units found late are held again without a deposit (RULES 3.11).
+  const found = known.events.some((event) => event.kind === 'found') ? [BigInt(0)] : [];
+  const possible = [...known.terms.map(minor), ...found];
+  const isLeast = possible.every((deposit) => deposit >= average);
+  const isGreatest = possible.every((deposit) => deposit <= average);
+  const [first, ...more] = known.terms.filter((terms) => minor(terms) === average);
+  if (!first || (!isLeast && !isGreatest)) return null;
+  return more.every((terms) => costsTheSame(terms, first)) ? average : null;
 }
 
 const costsTheSame = (a: AssessmentTerms, b: AssessmentTerms): boolean =>

@@ -39,8 +39,8 @@ export const statements = {
     released: (units: string) => `${units}, oldest issues first, each at the rate it was asked at`,
     fee: (unitDays: number, rate: string, freeDays: number | null) =>
       freeDays === null
-        ? `${formatUnits(unitDays)} unit-days beyond the free days at ${formatDecimal(rate)}`
-        : `${formatUnits(unitDays)} unit-days beyond ${formatUnits(freeDays)} ${plural(freeDays, { one: 'day', other: 'days' })} at ${formatDecimal(rate)}`,
+        ? `${formatUnits(unitDays)} unit-days beyond the free days at ${rate}`
+        : `${formatUnits(unitDays)} unit-days beyond ${formatUnits(freeDays)} ${plural(freeDays, { one: 'day', other: 'days' })} at ${rate}`,
     lost: (units: string) => `${units}, residual value less the deposit that each carried`,
     lostAt: (units: string, residual: string, deposit: string) =>
       `${units} at ${formatDecimal(residual)} residual value less ${formatDecimal(deposit)} deposit`,
@@ -145,7 +145,7 @@ export const statements = {
       `comes to ${now} now, ${billed} billed so far: ${amount}`,
     rules: {
       'deposits asked':
-        'A deposit is asked for each container when you count it in, at the rate of that day.',
+        'A deposit is asked for each container when the partner counts it in, at the rate of that day.',
       'deposits released':
         'Returned containers leave the oldest issue first; each releases the deposit that was asked for it.',
       'daily fee':

@@ -72,17 +72,31 @@ describe('lines of a statement', () => {
     });
   });
 
-  it('say nothing for certain where lost units may differ in their deposit', () => {
-    const later = { ...terms, validFrom: '2026-03-01', deposit: '5.00' };
-    const given = input('2026-03', [...february, ...march]);
-    const mixed = reckonStatement({ ...given, known: { ...given.known, terms: [terms, later] } });
-    expect(mixed.lines.find((each) => each.component === 'lost')).toMatchObject({
-      amount: '97.20',
-      parts: [],
-    });
+  const withTerms = (events: AssessmentEvent[], ...more: AssessmentTerms[]) => {
+    const given = input('2026-03', events);
+    return reckonStatement({ ...given, known: { ...given.known, terms: [terms, ...more] } });
+  };
+  const dearer = { ...terms, validFrom: '2026-03-01', deposit: '5.00' };
+
+  it('tell the deposit of lost units apart after a change of terms, as long as the oldest all carried one', () => {
+    const mixed = withTerms([...february, ...march], dearer);
+    expect(mixed.lines.find((each) => each.component === 'lost')?.parts).toEqual([
+      { quantity: 12, each: '8.10', residual: '12.60', deposit: '4.50' },
+    ]);
     expect(mixed.lines.find((each) => each.component === 'deposits asked')?.parts).toEqual([
       { quantity: 100, each: '5.00' },
     ]);
+  });
+
+  it('say nothing for certain where the units lost on one day carried different deposits', () => {
+    // 400 − 80 are left of February: the 330 lost take 10 of March's at 5.00 with them.
+    const events = march.map((each) => (each.kind === 'lost' ? { ...each, quantity: 330 } : each));
+    const mixed = withTerms([...february, ...events], dearer);
+    expect(mixed.lines.find((each) => each.component === 'lost')).toMatchObject({
+      // 320 × (12.60 − 4.50) + 10 × (12.60 − 5.00)
+      amount: '2668.00',
+      parts: [],
+    });
   });
 
   it('add up to the payable of the assessment; tax falls on fees and on deposits that were kept', () => {
