@@ -1,4 +1,6 @@
 import { monitorEventLoopDelay } from 'node:perf_hooks';
+import { appUser, ownerUser } from '@/db/local/accounts.mjs';
+import { startLocalDatabase } from '@/db/local/mariadb.mjs';
 import { aProduct, type Product } from '../support/app';
 import { csvOf, monthRows, xlsxOf } from '../support/month-file';
 
@@ -72,7 +74,27 @@ async function main(rows: number): Promise<void> {
   }
 }
 
-main(Number(process.argv[2] ?? 10_000)).catch((error: unknown) => {
+/** On a database server of its own, unless one is named. */
+async function onServer(work: () => Promise<void>): Promise<void> {
+  if (process.env.TEST_DATABASE_SERVER) return work();
+  const { host, port, accounts, stop } = await startLocalDatabase({ forTests: true, say: () => undefined });
+  const { ownerPassword, appPassword } = accounts;
+  process.env.TEST_DATABASE_SERVER = JSON.stringify({
+    host,
+    port,
+    ownerUser,
+    ownerPassword,
+    appUser,
+    appPassword,
+  });
+  try {
+    await work();
+  } finally {
+    await stop();
+  }
+}
+
+onServer(() => main(Number(process.argv[2] ?? 10_000))).catch((error: unknown) => {
   console.error(error);
   process.exitCode = 1;
 });
