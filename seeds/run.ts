@@ -13,6 +13,7 @@ const ended = 'demo ended';
 async function run(): Promise<void> {
   const url = process.env.DATABASE_URL;
   if (!url) throw new Error('DATABASE_URL is not set');
+  if (process.env.DEMO === 'no') return console.log('no demo wanted');
   const pool = poolOf(url, 4);
   const db = databaseOn(pool);
   try {
