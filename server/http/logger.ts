@@ -1,6 +1,6 @@
 import { type DestinationStream, type Logger, pino } from 'pino';
 
-type ErrorLike = { name?: unknown; message?: unknown; stack?: unknown; code?: unknown; cause?: unknown };
+type ErrorLike = { raw?: unknown; name?: unknown; message?: unknown; stack?: unknown; code?: unknown; cause?: unknown };
 
 /** The program's log. Headers and the values of failed statements stay out of it: they hold cookies, hashes, links. */
 export function loggerOf(level: string, destination?: DestinationStream): Logger {
@@ -11,7 +11,9 @@ export function loggerOf(level: string, destination?: DestinationStream): Logger
 /** Kind, code, message and place of an error and of what caused it, without the values of a statement. */
 export function loggedError(error: unknown): unknown {
   if (typeof error !== 'object' || error === null) return String(error);
-  const { name, message, stack, code, cause } = error as ErrorLike;
+  const { raw, name, message, stack, code, cause } = error as ErrorLike;
+  // pino-http hands on what it has already written down, with the error itself beside it.
+  if (raw !== undefined) return loggedError(raw);
   return {
     type: name,
     code,

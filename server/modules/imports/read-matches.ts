@@ -1,8 +1,9 @@
-import { and, asc, desc, eq, inArray, sql } from 'drizzle-orm';
+import { and, asc, desc, eq, gt, inArray, lt, or, sql } from 'drizzle-orm';
 import type { Reader } from '@/db/client';
 import { people } from '@/db/schema/companies';
 import { receiptMatches } from '@/db/schema/work';
 import type { ImportMatch, MatchPaper, MatchState } from '@/shared/contracts/import-results';
+import { cursorNumber } from '../../http/page';
 import type { KeptProblem } from './import-marks';
 import type { MatchRow } from './post-group';
 import { receiptPapers, shipmentPapers } from './read-papers';
@@ -21,7 +22,7 @@ export async function pageOfMatches(
   { importId, after, limit, state, rule }: Asked,
 ): Promise<{ rows: ImportMatch[]; next: string | null }> {
   const [score = '0', group = ''] = (after ?? '').split(' ');
-  const key = { score: Number(score), group };
+  const key = { score: cursorNumber(score), group };
   const heads = await db
     .selectDistinct({ groupId: receiptMatches.groupId, score: receiptMatches.score })
     .from(receiptMatches)
@@ -32,7 +33,10 @@ export async function pageOfMatches(
         rule === undefined ? sql`${receiptMatches.rule} <> 'unannounced'` : eq(receiptMatches.rule, rule),
         after === undefined
           ? undefined
-          : sql`(${receiptMatches.score} < ${key.score} or (${receiptMatches.score} = ${key.score} and ${receiptMatches.groupId} > ${key.group}))`,
+          : or(
+              lt(receiptMatches.score, key.score),
+              and(eq(receiptMatches.score, key.score), gt(receiptMatches.groupId, key.group)),
+            ),
       ),
     )
     .orderBy(desc(receiptMatches.score), asc(receiptMatches.groupId))
