@@ -78,12 +78,12 @@ function stateCondition(db: Reader, state: Query['state'], today: string): SQL |
   );
 }
 
-/** Not counted although more than the partner's days have passed since it was expected. Needs the two companies joined. */
+/** Not counted although more than the partner's days have passed since it left (RULES 5). Needs the two companies joined. */
 export function overdueBy(today: string): SQL | undefined {
   return and(
     eq(shipments.state, 'on the way'),
     lt(
-      sql`date_add(${shipments.expectedOn}, interval if(${toCompany.kind} = 'partner', ${toCompany.overdueAfterDays}, ${fromCompany.overdueAfterDays}) day)`,
+      sql`date_add(${shipments.leftOn}, interval if(${toCompany.kind} = 'partner', ${toCompany.overdueAfterDays}, ${fromCompany.overdueAfterDays}) day)`,
       today,
     ),
   );

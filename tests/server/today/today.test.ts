@@ -85,8 +85,8 @@ describe('Today', () => {
       const { body } = await (await product.as(lane.ane)).get('/today');
       return body.overdue.rows.map((row: { id: string }) => row.id);
     };
-    expect(await overdueOn('2026-03-28T09:00:00.000Z')).not.toContain(id);
-    expect(await overdueOn('2026-03-29T09:00:00.000Z')).toContain(id);
+    expect(await overdueOn('2026-03-27T09:00:00.000Z')).not.toContain(id);
+    expect(await overdueOn('2026-03-28T09:00:00.000Z')).toContain(id);
   });
 
   it('gives the engineer what is under or over its approved size or level', async () => {
