@@ -1,12 +1,14 @@
 import { inTransaction } from '@/db/transaction';
 import { outsideAccount, siteAccount } from '@/server/modules/ledger/accounts';
 import { postEntry } from '@/server/modules/ledger/post-entry';
-import { addDays, dayInZone } from '@/shared/domain/calendar';
+import { dayInZone, firstDayOfMonth, monthOf, previousMonth } from '@/shared/domain/calendar';
 import type { Stage } from './stage';
 
 export const zone = 'Europe/Copenhagen';
 /** The day it is at the plant: the server of a journey runs by the real clock. */
 export const today = (): string => dayInZone(new Date(), zone);
+/** The month that is over and can be closed. */
+export const lastMonth = (): string => previousMonth(monthOf(today()));
 
 /** The invented scenario in small: the operator with two plants, two partners, types with terms, people of all roles. */
 export async function aScene(stage: Stage) {
@@ -62,7 +64,7 @@ async function itsPeople({ aPerson }: Stage, { operator, kestrel, orrin }: Compa
   };
 }
 
-/** 5 000 totes and 500 lids stand at each plant, 400 totes at Kestrel, since 200 days. */
+/** 5 000 totes and 500 lids stand at each plant, 400 totes at Kestrel, since the first day of last month. */
 async function openTheBook(stage: Stage, { sites, types }: Pick<Scene, 'sites' | 'types'>): Promise<void> {
   const stock = [
     { site: sites.tarnby, typeCode: types.tote.code, units: 5000 },
@@ -76,7 +78,7 @@ async function openTheBook(stage: Stage, { sites, types }: Pick<Scene, 'sites' |
     for (const { site, typeCode, units } of stock) {
       await postEntry(tx, {
         kind: 'opening',
-        valueDate: addDays(today(), -200),
+        valueDate: firstDayOfMonth(lastMonth()),
         moves: [{ typeCode, units, from, to: await siteAccount(tx, site) }],
         reason: 'Counted when the book was opened',
         personId: null,
