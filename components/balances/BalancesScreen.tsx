@@ -1,6 +1,7 @@
-import { type BalanceRow, listBalances } from '@/shared/contracts/balances';
+import { type BalanceRow, downloadBalances, listBalances } from '@/shared/contracts/balances';
 import { listShipmentChoices } from '@/shared/contracts/shipments';
 import { text } from '@/shared/text/catalogue';
+import { urlOf } from '../data/url-of';
 import { useRead, useReadPages } from '../data/use-operation';
 import { useSignedIn } from '../data/use-session';
 import type { Filter } from '../tables/ListTools';
@@ -51,6 +52,7 @@ export function BalancesScreen() {
         rowHref={(row) => balanceHref(row, { asOf })}
         state={state}
         filters={filters}
+        downloads={[{ href: urlOf(downloadBalances, { query: state.query }), label: text.ui.download }]}
         {...(isOperator ? { searchLabel: words.search } : {})}
         empty={{ title: words.empty, hint: words.emptyHint[company.kind] }}
       />

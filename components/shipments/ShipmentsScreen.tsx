@@ -1,5 +1,11 @@
-import { listShipmentChoices, listShipments, type ShipmentRow } from '@/shared/contracts/shipments';
+import {
+  downloadShipments,
+  listShipmentChoices,
+  listShipments,
+  type ShipmentRow,
+} from '@/shared/contracts/shipments';
 import { text } from '@/shared/text/catalogue';
+import { urlOf } from '../data/url-of';
 import { useRead, useReadPages } from '../data/use-operation';
 import { useSignedIn } from '../data/use-session';
 import { RecordList } from '../tables/RecordList';
@@ -54,6 +60,7 @@ export function ShipmentsScreen() {
         state={state}
         filters={filters}
         searchLabel={words.search}
+        downloads={[{ href: urlOf(downloadShipments, { query: state.query }), label: text.ui.download }]}
         empty={{ title: words.empty, hint: words.emptyHint[sends] }}
       />
     </Page>

@@ -37,18 +37,31 @@ export const balanceRow = z.object({
 });
 export type BalanceRow = z.infer<typeof balanceRow>;
 
+const balancesQuery = listQuery.extend({
+  asOf: day.optional(),
+  company: id.optional(),
+  type: code.optional(),
+});
+
 export const listBalances = operation({
   name: 'listBalances',
   resource: 'balances',
   method: 'GET',
   path: '/balances',
   summary: 'Units by company and container type, now or at the end of a day',
-  query: listQuery.extend({
-    asOf: day.optional(),
-    company: id.optional(),
-    type: code.optional(),
-  }),
+  query: balancesQuery,
   answer: pageOf(balanceRow).extend({ asOf: day.nullable(), today: day }),
+});
+
+export const downloadBalances = operation({
+  name: 'downloadBalances',
+  resource: 'balances',
+  method: 'GET',
+  path: '/balances.xlsx',
+  summary: 'The same list as a spreadsheet',
+  query: balancesQuery.omit({ after: true, limit: true }),
+  answers: 'file',
+  answer: z.unknown(),
 });
 
 export const readBalance = operation({

@@ -51,19 +51,32 @@ export type ShipmentRow = z.infer<typeof shipmentRow>;
 
 export const shipmentSorts = ['leftOn', 'expectedOn'] as const;
 
+const shipmentsQuery = listQuery.extend({
+  direction: z.enum(['in', 'out']).optional(),
+  state: z.enum([...shipmentStates, 'overdue', 'differs']).optional(),
+  contents: contents.optional(),
+  partner: id.optional(),
+});
+
 export const listShipments = operation({
   name: 'listShipments',
   resource: 'shipments',
   method: 'GET',
   path: '/shipments',
   summary: 'Shipments that the own company sends or receives; the operator sees all',
-  query: listQuery.extend({
-    direction: z.enum(['in', 'out']).optional(),
-    state: z.enum([...shipmentStates, 'overdue', 'differs']).optional(),
-    contents: contents.optional(),
-    partner: id.optional(),
-  }),
+  query: shipmentsQuery,
   answer: pageOf(shipmentRow),
+});
+
+export const downloadShipments = operation({
+  name: 'downloadShipments',
+  resource: 'shipments',
+  method: 'GET',
+  path: '/shipments.xlsx',
+  summary: 'The same list as a spreadsheet, a line for each container type',
+  query: shipmentsQuery.omit({ after: true, limit: true }),
+  answers: 'file',
+  answer: z.unknown(),
 });
 
 const countRow = z.object({

@@ -1,8 +1,9 @@
 import * as contracts from '@/shared/contracts/balances';
-import { post, read, type Route } from '../../http/route';
+import { file, post, read, type Route } from '../../http/route';
 import { operatorDay } from '../partners/operator-day';
 import { adjustStock } from './adjust-stock';
 import { adjustmentChoices } from './adjustment-choices';
+import { balancesWorkbook } from './balances-workbook';
 import { movementRows } from './list-movements';
 import { balanceRows, oneBalance } from './read-model';
 import { reverseEntry } from './reverse-entry';
@@ -10,6 +11,9 @@ import { reverseEntry } from './reverse-entry';
 export const balanceRoutes: Route[] = [
   read(contracts.listBalances, 'see balances', async ({ query, person, db, at }) =>
     balanceRows(db, { query, person, today: await operatorDay(db, at.now) }),
+  ),
+  file(contracts.downloadBalances, 'see balances', async ({ query, person, db, at }) =>
+    balancesWorkbook(db, { query, person, today: await operatorDay(db, at.now) }),
   ),
   read(contracts.readBalance, 'see balances', async ({ params, query, person, db, at }) =>
     oneBalance(db, { params, query, person, today: await operatorDay(db, at.now) }),

@@ -1,15 +1,19 @@
 import * as contracts from '@/shared/contracts/shipments';
-import { post, read, type Route } from '../../http/route';
+import { file, post, read, type Route } from '../../http/route';
 import { operatorDay } from '../partners/operator-day';
 import { countByForm } from './count-by-form';
 import { listShipments } from './list-shipments';
 import { readShipment } from './read-shipment';
 import { sendByForm } from './send-by-form';
 import { shipmentChoices } from './shipment-choices';
+import { shipmentsWorkbook } from './shipments-workbook';
 
 export const shipmentRoutes: Route[] = [
   read(contracts.listShipments, 'see shipments', async ({ query, person, db, at }) =>
     listShipments(db, { query, person, today: await operatorDay(db, at.now) }),
+  ),
+  file(contracts.downloadShipments, 'see shipments', async ({ query, person, db, at }) =>
+    shipmentsWorkbook(db, { query, person, today: await operatorDay(db, at.now) }),
   ),
   read(contracts.readShipment, 'see shipments', ({ params, person, db }) =>
     readShipment(db, { id: params.shipment, person }),

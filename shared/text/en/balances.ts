@@ -44,6 +44,7 @@ export const balances = {
     toIt: 'on the way there',
     toItDiffers: 'sent there, counted otherwise, not settled',
   },
+  typeCode: 'Type',
   held: 'Holds',
   notHeld: 'Not yet held',
   heldNote:

@@ -1,0 +1,60 @@
+import { PassThrough, type Readable } from 'node:stream';
+import ExcelJS from 'exceljs';
+import { cellText } from './cell-text';
+import { dayCell, dayFormat, unitsFormat } from './number-formats';
+
+/** A column of a list on a sheet: text, whole units or a day. */
+export type SheetColumn<Row> = { head: string; width?: number } & (
+  | { text: (row: Row) => string }
+  | { units: (row: Row) => number | null }
+  | { day: (row: Row) => string | null }
+);
+
+type List<Row> = {
+  /** Of the sheet: at most 31 characters, none of \ / ? * [ ] : */
+  name: string;
+  columns: readonly SheetColumn<Row>[];
+  /** Read page by page while the file is written, so that a long list needs no more memory than a short one. */
+  pages: AsyncIterable<readonly Row[]>;
+};
+
+/** A list as a spreadsheet: days are dates, units are numbers, text is never a formula. */
+export function listWorkbook<Row>(list: List<Row>): Readable {
+  const stream = new PassThrough();
+  void write(list, stream).catch((error: unknown) => {
+    stream.destroy(error instanceof Error ? error : new Error(String(error)));
+  });
+  return stream;
+}
+
+async function write<Row>({ name, columns, pages }: List<Row>, stream: PassThrough): Promise<void> {
+  const workbook = new ExcelJS.stream.xlsx.WorkbookWriter({
+    stream,
+    useSharedStrings: false,
+    useStyles: true,
+  });
+  const sheet = workbook.addWorksheet(name, { views: [{ state: 'frozen', ySplit: 1 }] });
+  sheet.columns = columns.map((column) => ({
+    header: cellText(column.head),
+    width: column.width ?? 14,
+    style: { numFmt: formatOf(column) },
+  }));
+  sheet.getRow(1).font = { bold: true };
+  sheet.getRow(1).commit();
+  for await (const page of pages)
+    for (const row of page) sheet.addRow(columns.map((column) => valueOf(column, row))).commit();
+  sheet.commit();
+  await workbook.commit();
+}
+
+function formatOf<Row>(column: SheetColumn<Row>): string {
+  if ('day' in column) return dayFormat;
+  return 'units' in column ? unitsFormat : '@';
+}
+
+function valueOf<Row>(column: SheetColumn<Row>, row: Row): string | number | Date | null {
+  if ('text' in column) return cellText(column.text(row));
+  if ('units' in column) return column.units(row);
+  const day = column.day(row);
+  return day === null ? null : dayCell(day);
+}
