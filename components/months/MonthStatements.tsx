@@ -32,10 +32,14 @@ export function MonthStatements({ page }: { page: MonthPage }) {
           <DownloadLink href={urlOf(downloadMonth, { params: { month } })} label={words.downloadAll} />
         </Box>
       ) : null}
-      {page.mayDraft ? <DraftAgain month={month} /> : null}
+      {page.mayDraft && isUnfinished(page) ? <DraftAgain month={month} /> : null}
     </Card>
   );
 }
+
+/** While a draft waits or a partner could not be reckoned, what is known now may change them. */
+const isUnfinished = ({ statements, jobs }: MonthPage) =>
+  statements.drafts > 0 || jobs.some((job) => job.refused.length > 0);
 
 function IssueAll({ page }: { page: MonthPage }) {
   const issue = usePost(issueStatements, { refreshes: ['statements'] });

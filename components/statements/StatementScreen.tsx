@@ -9,6 +9,7 @@ import { useIsWide } from '../theme/use-breakpoint';
 import { Card } from '../ui/Card';
 import { Page } from '../ui/Page';
 import { Skeleton } from '../ui/Skeleton';
+import { Text } from '../ui/Text';
 import { AnswerPanel } from './AnswerPanel';
 import { ContainersSheet } from './ContainersSheet';
 import { DueNow } from './DueNow';
@@ -53,6 +54,7 @@ export function StatementScreen({ statement }: { statement: string }) {
         <ContainersSheet page={data} />
         <MoneySheet page={data} />
         <TaxSheet page={data} />
+        <Text variant="small">{words.fingerprint(data.sha256)}</Text>
       </Card>
     </Page>
   );

@@ -49,7 +49,7 @@ export function TaxSheet({ page }: { page: StatementPage }) {
         rows={rows}
         rowKey={(row) => row.key}
         sum={{
-          what: <Text strong>{page.state === 'draft' ? words.wouldBeDue : words.dueRow}</Text>,
+          what: <Text strong>{page.state === 'draft' ? words.wouldBeDueRow : words.dueRow}</Text>,
           amount: <Figure money={dueNow} currency={currency} withoutCurrency />,
         }}
       />

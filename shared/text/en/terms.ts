@@ -35,7 +35,6 @@ export const terms = {
   set: 'Set new terms',
   setFor: (type: string) => `New terms for ${type}`,
   setFirst: 'Set terms',
-  noTerms: 'No terms yet',
   noTermsNeeded: 'No terms, though this partner has had it in hand: its months cannot be reckoned.',
   otherTypes: 'Types without terms',
   earlier: (count: number) =>
