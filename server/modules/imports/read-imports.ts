@@ -5,6 +5,7 @@ import { people } from '@/db/schema/companies';
 import { imports, jobs } from '@/db/schema/work';
 import type { ImportDetail, ImportRow, ImportState, ImportTotals } from '@/shared/contracts/imports';
 import { Problem } from '@/shared/problems/problems';
+import { cursor, cutPage } from '../../http/page';
 import { numbersOf } from './read-numbers';
 
 type ListAsked = { after?: string | undefined; limit: number; state?: ImportState | undefined };
@@ -14,23 +15,21 @@ export async function listImportRows(
   db: Reader,
   { after, limit, state }: ListAsked,
 ): Promise<{ rows: ImportRow[]; next: string | null }> {
+  const seen = cursor(after, 1);
   const rows = await db
     .select({ held: imports, by: people.name })
     .from(imports)
     .leftJoin(people, eq(people.id, imports.createdBy))
     .where(
       and(
-        after === undefined ? undefined : lt(imports.id, after),
+        seen ? lt(imports.id, seen[0]) : undefined,
         state === undefined ? undefined : eq(imports.state, state),
       ),
     )
     .orderBy(desc(imports.id))
     .limit(limit + 1);
-  const page = rows.slice(0, limit);
-  return {
-    rows: page.map(({ held, by }) => headOf(held, by)),
-    next: rows.length > limit ? (page.at(-1)?.held.id ?? null) : null,
-  };
+  const page = cutPage(rows, limit, ({ held }) => [held.id]);
+  return { rows: page.rows.map(({ held, by }) => headOf(held, by)), next: page.next };
 }
 
 const headOf = (held: typeof imports.$inferSelect, by: string | null): ImportRow => ({

@@ -3,7 +3,7 @@ import type { Reader } from '@/db/client';
 import { people } from '@/db/schema/companies';
 import { receiptMatches } from '@/db/schema/work';
 import type { ImportMatch, MatchPaper, MatchState } from '@/shared/contracts/import-results';
-import { cursorNumber } from '../../http/page';
+import { cursor, cursorNumber, cutPage } from '../../http/page';
 import type { KeptProblem } from './import-marks';
 import type { MatchRow } from './post-group';
 import { receiptPapers, shipmentPapers } from './read-papers';
@@ -16,13 +16,12 @@ type Asked = {
   rule?: string | undefined;
 };
 
-/** Matches or suggestions of an import, the surest first; the key is "score group". */
+/** Matches or suggestions of an import, the surest first; the key is score and group. */
 export async function pageOfMatches(
   db: Reader,
   { importId, after, limit, state, rule }: Asked,
 ): Promise<{ rows: ImportMatch[]; next: string | null }> {
-  const [score = '0', group = ''] = (after ?? '').split(' ');
-  const key = { score: cursorNumber(score), group };
+  const seen = cursor(after, 2);
   const heads = await db
     .selectDistinct({ groupId: receiptMatches.groupId, score: receiptMatches.score })
     .from(receiptMatches)
@@ -31,26 +30,21 @@ export async function pageOfMatches(
         eq(receiptMatches.importId, importId),
         eq(receiptMatches.state, state),
         rule === undefined ? sql`${receiptMatches.rule} <> 'unannounced'` : eq(receiptMatches.rule, rule),
-        after === undefined
-          ? undefined
-          : or(
-              lt(receiptMatches.score, key.score),
-              and(eq(receiptMatches.score, key.score), gt(receiptMatches.groupId, key.group)),
-            ),
+        seen ? behind({ score: cursorNumber(seen[0]), groupId: seen[1] }) : undefined,
       ),
     )
     .orderBy(desc(receiptMatches.score), asc(receiptMatches.groupId))
     .limit(limit + 1);
-  const page = heads.slice(0, limit);
-  const last = page.at(-1);
-  return {
-    rows: await described(
-      db,
-      page.map(({ groupId }) => groupId),
-    ),
-    next: heads.length > limit && last ? `${last.score} ${last.groupId}` : null,
-  };
+  const page = cutPage(heads, limit, ({ score, groupId }) => [String(score), groupId]);
+  const groupIds = page.rows.map(({ groupId }) => groupId);
+  return { rows: await described(db, groupIds), next: page.next };
 }
+
+const behind = ({ score, groupId }: { score: number; groupId: string }) =>
+  or(
+    lt(receiptMatches.score, score),
+    and(eq(receiptMatches.score, score), gt(receiptMatches.groupId, groupId)),
+  );
 
 async function described(db: Reader, groupIds: readonly string[]): Promise<ImportMatch[]> {
   if (groupIds.length === 0) return [];

@@ -3,6 +3,7 @@ import type { Reader } from '@/db/client';
 import { shipments } from '@/db/schema/shipments';
 import { receiptMatches, receipts } from '@/db/schema/work';
 import type { ImportReceipt } from '@/shared/contracts/import-results';
+import { cursor, cutPage } from '../../http/page';
 import { receiptPapers } from './read-papers';
 
 type Asked = {
@@ -17,6 +18,7 @@ export async function pageOfReceipts(
   db: Reader,
   { importId, after, limit, state }: Asked,
 ): Promise<{ rows: ImportReceipt[]; next: string | null }> {
+  const seen = cursor(after, 1);
   const found = await db
     .select()
     .from(receipts)
@@ -24,12 +26,12 @@ export async function pageOfReceipts(
       and(
         eq(receipts.importId, importId),
         eq(receipts.state, state),
-        after === undefined ? undefined : gt(receipts.id, after),
+        seen ? gt(receipts.id, seen[0]) : undefined,
       ),
     )
     .orderBy(asc(receipts.id))
     .limit(limit + 1);
-  const page = found.slice(0, limit);
+  const { rows: page, next } = cutPage(found, limit, ({ id }) => [id]);
   const papers = await receiptPapers(
     db,
     page.map(({ id }) => id),
@@ -51,7 +53,7 @@ export async function pageOfReceipts(
         { ...paper, state, rowNo: row.rowNo, first, shipment: ships.get(row.duplicateOf ?? row.id) ?? null },
       ];
     }),
-    next: found.length > limit ? (page.at(-1)?.id ?? null) : null,
+    next,
   };
 }
 

@@ -186,3 +186,20 @@ describe('the preview of a file', () => {
     expect([late.status, late.body.code]).toEqual([409, 'state changed']);
   });
 });
+
+describe('the list of imports', () => {
+  it('gives the newest first, page by page, and refuses a key that it did not give out', async () => {
+    const ids: string[] = [];
+    for (const name of ['one.csv', 'two.csv', 'three.csv'])
+      ids.unshift((await scene.upload(csvOf(good), name)).body.id);
+    const first = await scene.coordinator.get('/imports', { limit: '2', state: 'preview' });
+    const second = await scene.coordinator.get('/imports', {
+      limit: '2',
+      state: 'preview',
+      after: first.body.next,
+    });
+    const idsOf = (page: { body: { rows: { id: string }[] } }) => page.body.rows.map(({ id }) => id);
+    expect([...idsOf(first), ...idsOf(second)].slice(0, 3)).toEqual(ids);
+    expect((await scene.coordinator.get('/imports', { after: 'made up' })).status).toBe(400);
+  });
+});
