@@ -16,7 +16,8 @@ export function rateLimits(pool: Pool): Limits {
   const limiter = (keyPrefix: string, rule: { points: number; duration: number; blockDuration?: number }) =>
     new RateLimiterMySQL({
       storeClient: (pool as unknown as { pool: unknown }).pool,
-      storeType: 'mysql2',
+      // "pool": each count takes one connection. Any other word would begin transactions on whichever is free.
+      storeType: 'pool',
       dbName: databaseOf(pool),
       tableName: 'rate_limits',
       tableCreated: true,

@@ -8,12 +8,14 @@ import { instantOf } from '../deps';
 export type Mailer = Pick<Transporter, 'sendMail'> | null;
 const leaseMs = 120_000;
 const mostAttempts = 8;
-const carriesLink = new Set(['reset link', 'invitation']);
 
 /** The transport of SMTP_URL; without one, messages are captured for the administrator to read. */
 export function mailerOf(smtpUrl: string | undefined): Mailer {
   return smtpUrl ? createTransport(smtpUrl) : null;
 }
+
+/** A link that lets someone in is kept no longer than it is needed. */
+const withoutLinks = (text: string): string => text.replace(/token=[\w-]+/g, 'token=…');
 
 type Message = typeof outbox.$inferSelect;
 
@@ -64,6 +66,7 @@ async function deliver(deps: Deps, { mailer, message }: { mailer: Mailer; messag
     });
     await mark({
       state: 'sent',
+      text: withoutLinks(message.text),
       sentAt: instantOf(deps.clock),
       claimedUntil: null,
       attempts: message.attempts + 1,
@@ -74,8 +77,10 @@ async function deliver(deps: Deps, { mailer, message }: { mailer: Mailer; messag
     const wait = Math.min(3_600_000, 30_000 * 2 ** attempts);
     const notBefore = new Date(deps.clock.now().getTime() + wait).toISOString();
     deps.logger.warn({ err: error, message: message.id }, 'mail not sent');
+    const givenUp = attempts >= mostAttempts;
     await mark({
-      state: attempts >= mostAttempts ? 'failed' : 'waiting',
+      state: givenUp ? 'failed' : 'waiting',
+      ...(givenUp ? { text: withoutLinks(message.text) } : {}),
       attempts,
       problem,
       notBefore,
