@@ -43,7 +43,7 @@ export const partColumns: readonly Column<PartRow>[] = [
   {
     key: 'state',
     head: words.columns.state,
-    cell: (row) => (row.active ? words.use['in use'] : <Tag tone="open" label={words.use['out of use']} />),
+    cell: (row) => (row.active ? null : <Tag tone="open" label={words.use['out of use']} />),
     cardRole: 'tag',
   },
 ];

@@ -51,12 +51,14 @@ function Approval({ approval }: { approval: PoolApproval }) {
       <Text>{words.approvalLine(by, dayInZone(at, company.timeZone))}</Text>
       {note === '' ? null : <Text>{note}</Text>}
       <Disclosure label={words.approvalFrom}>
-        <Text variant="soft">{words.approvalFacts(result)}</Text>
-        {levels.map(({ site, minimum, maximum }) => (
-          <Text key={site.id} variant="soft">
-            {words.levelLine(text.parts.form.site(site.name, site.company), { minimum, maximum })}
-          </Text>
-        ))}
+        <Box gap="xs">
+          <Text variant="soft">{words.approvalFacts(result)}</Text>
+          {levels.map(({ site, minimum, maximum }) => (
+            <Text key={site.id} variant="soft">
+              {words.levelLine(text.parts.form.site(site.name, site.company), { minimum, maximum })}
+            </Text>
+          ))}
+        </Box>
       </Disclosure>
     </>
   );

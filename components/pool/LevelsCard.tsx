@@ -1,6 +1,7 @@
 import { text } from '@/shared/text/catalogue';
+import { formatUnits } from '@/shared/text/format';
 import { Card } from '../ui/Card';
-import { Figure } from '../ui/Figure';
+import { Link } from '../ui/Link';
 import { Sheet } from '../ui/Sheet';
 import { Tag } from '../ui/Tag';
 import { Text } from '../ui/Text';
@@ -32,21 +33,27 @@ export function LevelsCard({ pool }: { pool: Pool }) {
               key: 'units',
               head: words.levelColumns.units,
               align: 'end',
-              cell: (row) => <Figure units={row.units} />,
+              cell: (row) => (
+                <Link
+                  href={`/balances/${row.companyId}/${pool.type.code}?site=${row.id}`}
+                  label={formatUnits(row.units)}
+                  name={words.movementsAt(row.units, row.name)}
+                />
+              ),
             },
             {
-              key: 'minimum',
-              head: words.levelColumns.minimum,
+              key: 'level',
+              head: words.levelColumns.level,
               align: 'end',
-              cell: (row) => <Figure units={row.minimum} plain />,
+              cell: (row) =>
+                row.minimum === null || row.maximum === null ? '–' : words.level(row.minimum, row.maximum),
             },
             {
-              key: 'maximum',
-              head: words.levelColumns.maximum,
-              align: 'end',
-              cell: (row) => <Figure units={row.maximum} plain />,
+              key: 'standing',
+              head: words.levelColumns.standing,
+              width: 116,
+              cell: (row) => <Standing site={row} />,
             },
-            { key: 'standing', head: words.levelColumns.standing, cell: (row) => <Standing site={row} /> },
           ]}
         />
       )}

@@ -1,6 +1,6 @@
 import type { ReckonedPool } from '@/shared/contracts/pool-sizing';
 import { text } from '@/shared/text/catalogue';
-import { formatShare, formatUnits } from '@/shared/text/format';
+import { formatUnits } from '@/shared/text/format';
 import { Card } from '../ui/Card';
 import { LazyLineChart } from '../ui/LazyLineChart';
 import type { Marker } from '../ui/LineChart';
@@ -18,7 +18,7 @@ export function PoolCurve({ reckoned }: { reckoned: ReckonedPool }) {
         summary={curveWords(reckoned)}
         xHead={words.curveX}
         formatX={formatUnits}
-        formatY={formatShare}
+        formatY={words.share}
         markers={markersOf(reckoned)}
         series={[
           {

@@ -32,7 +32,7 @@ export function RunningShortCard({ reckoned, currency }: Props) {
         rows={rows}
         rowKey={(row) => row.key}
         columns={[
-          { key: 'label', head: '', cell: (row) => row.label },
+          { key: 'label', head: words.runningHead, cell: (row) => row.label },
           {
             key: 'from',
             head: words.reckoned.with,

@@ -1,4 +1,4 @@
-import { useEffect, useState } from 'react';
+import { useEffect, useRef, useState } from 'react';
 import { useWatch } from 'react-hook-form';
 import { previewPool, savePlan } from '@/shared/contracts/pool';
 import { type PlanTurns, planTurns, type PoolPlan, type ReckonedPool } from '@/shared/contracts/pool-sizing';
@@ -18,11 +18,9 @@ export function usePlanEditing({ code, plan, reckoned }: Stored) {
   const { may } = useSignedIn();
   const stored = turnsOf(plan);
   const draft = useDraftForm({ name: `pool ${code}`, schema: planTurns, defaultValues: stored });
-  const { isDirty } = draft.form.formState;
-  // A plan that was changed elsewhere is shown, unless something is being turned here.
-  useEffect(() => {
-    if (!isDirty) draft.form.reset(turnsOf(plan));
-  }, [plan, isDirty, draft.form]);
+  useStoredChange(stored, (changedTo) => {
+    if (!draft.form.formState.isDirty) draft.form.reset(changedTo);
+  });
   const typed = planTurns.safeParse(useWatch({ control: draft.form.control }));
   const turned = useSettled(typed.success ? typed.data : stored);
   const isStored = same(turned, stored);
@@ -49,6 +47,16 @@ const turnsOf = ({ bufferDays, coverPct, travel }: PoolPlan): PlanTurns => ({ bu
 
 const same = (a: PlanTurns, b: PlanTurns) =>
   a.bufferDays === b.bufferDays && a.coverPct === b.coverPct && a.travel === b.travel;
+
+/** A plan that was changed elsewhere is shown, unless something is being turned here; what was typed before a reload stays. */
+function useStoredChange(stored: PlanTurns, onChange: (stored: PlanTurns) => void) {
+  const before = useRef(stored);
+  useEffect(() => {
+    if (same(before.current, stored)) return;
+    before.current = stored;
+    onChange(stored);
+  });
+}
 
 /** The value once it has stood still for a moment, so that not every keystroke is asked about. */
 function useSettled(value: PlanTurns): PlanTurns {

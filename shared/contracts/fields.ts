@@ -22,7 +22,9 @@ export const proseOrEmpty = (most: number) =>
 export const code = z
   .string()
   .trim()
-  .regex(/^[A-Z0-9][A-Z0-9-]{0,19}$/, 'Capitals, digits and hyphens, at most 20');
+  .regex(/^[A-Z0-9][A-Z0-9-]{0,19}$/, {
+    error: ({ input }) => (input === '' ? undefined : 'Capitals, digits and hyphens, at most 20'),
+  });
 
 export const email = z
   .email()

@@ -68,7 +68,12 @@ export const readPool = operation({
     approved: approval.nullable(),
     /** Sites that hold the type or whose parts travel in it, with what stands there. */
     sites: z.array(
-      siteName.extend({ units: z.int(), minimum: z.int().nullable(), maximum: z.int().nullable() }),
+      siteName.extend({
+        companyId: id,
+        units: z.int(),
+        minimum: z.int().nullable(),
+        maximum: z.int().nullable(),
+      }),
     ),
   }),
 });

@@ -15,12 +15,12 @@ export async function unitsInPool(db: Reader): Promise<Map<string, number>> {
   );
 }
 
-export type SiteStock = { id: string; name: string; company: string; units: number };
+export type SiteStock = { id: string; name: string; company: string; companyId: string; units: number };
 
 /** Sites that hold a type, or between which its parts travel, with what stands there. */
 export async function stockBySite(db: Reader, typeCode: string): Promise<SiteStock[]> {
   const [rows] = await db.execute(
-    sql`select s.id as id, s.name as name, c.name as company, coalesce(b.units, 0) as units
+    sql`select s.id as id, s.name as name, c.name as company, c.id as companyId, coalesce(b.units, 0) as units
         from sites s join companies c on c.id = s.company_id
         left join accounts a on a.site_id = s.id left join balances b on b.account_id = a.id and b.type_code = ${typeCode}
         where coalesce(b.units, 0) <> 0 or (s.active and exists (

@@ -36,7 +36,7 @@ export function reckonPool(plan: PoolPlan, of: { flows: Flows; inPool: number })
     return {
       input,
       result,
-      curve: poolCurve(input, { ...rangeOf(result, today), steps: 61 }),
+      curve: poolCurve(input, { ...rangeOf(result, today), steps: 41 }),
       atNeeded: pointAt(input, result.needed, result.poolSize),
       atToday: today > 0 ? pointAt(input, today, of.inPool) : null,
     };

@@ -22,14 +22,14 @@ export const parts = {
     number: 'Part',
     type: 'Travels in',
     between: 'Between',
-    perContainer: 'A container',
+    perContainer: 'Parts each',
     perDay: 'Parts a day',
     containers: 'Containers a day',
     state: 'State',
   },
   partName: (number: string, name: string) => `${number} ${name}`,
   between: (supplier: string, plant: string) => `${supplier} → ${plant}`,
-  perDay: (mean: string, sd: string) => `${mean} ± ${sd}`,
+  perDay: (mean: string, sd: string) => `${mean}\u00a0±\u00a0${sd}`,
 
   form: {
     number: 'Part number',

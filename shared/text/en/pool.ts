@@ -1,8 +1,11 @@
 import { formatDay, formatNumber, formatShare, formatUnits } from '../format';
 import { plural } from '../plural';
 
-/** A share that is not 0 never reads as 0. */
-const share = (value: number) => (value > 0 && value < 0.0005 ? 'under 0.1\u202f%' : formatShare(value));
+/** A share that is not 0 never reads as 0, nor one that is not all as 100 %. */
+function share(value: number): string {
+  if (value > 0 && value < 0.0005) return 'under 0.1\u202f%';
+  return value < 1 && value >= 0.9995 ? 'over 99.9\u202f%' : formatShare(value);
+}
 
 type Units = { units: number; many: string };
 
@@ -123,6 +126,7 @@ export const pool = {
   runningLead:
     'The share of loads that find no empty, times the trips a year, times what one trip in one-way packaging costs you. Enter that cost; it is not kept.',
   oneWayCost: 'One-way packaging for one load',
+  runningHead: 'Pool',
   runningToday: 'with today’s pool',
   runningNeeded: 'with the needed pool',
   runningYear: (money: string) => `${money} a year`,
@@ -174,13 +178,9 @@ export const pool = {
     neededForBuffer: number;
   }) =>
     `${formatNumber(result.containersPerDay)} containers a day, loop ${formatNumber(result.loopDays)} days, ${formatUnits(result.neededForCover)} for cover, ${formatUnits(result.neededForBuffer)} for the buffer.`,
-  levelColumns: {
-    site: 'Site',
-    minimum: 'Minimum',
-    maximum: 'Maximum',
-    units: 'There now',
-    standing: 'Stands',
-  },
+  levelColumns: { site: 'Site', level: 'Level', units: 'Now', standing: 'Stands' },
+  level: (minimum: number, maximum: number) => `${formatUnits(minimum)}\u00a0to\u00a0${formatUnits(maximum)}`,
+  movementsAt: (units: number, site: string) => `${formatUnits(units)} at ${site}, the movements behind it`,
   levelLine: (site: string, { minimum, maximum }: { minimum: number; maximum: number }) =>
     `${site}: ${formatUnits(minimum)} to ${formatUnits(maximum)}`,
   levels: 'Who is under or over',
