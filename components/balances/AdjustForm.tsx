@@ -1,4 +1,5 @@
 import { useWatch } from 'react-hook-form';
+import { z } from 'zod';
 import {
   adjustmentForm,
   adjustmentKinds,
@@ -19,12 +20,17 @@ const words = text.balances;
 
 export type Booked = AnswerOf<typeof adjustStock>;
 type Choices = AnswerOf<typeof listAdjustmentChoices>;
+/** Nothing chosen is told as that, before the shape of a code is looked at. */
+const adjustDraft = adjustmentForm.extend({
+  typeCode: z.string().min(1, text.fields.choose).pipe(adjustmentForm.shape.typeCode),
+});
+
 type Props = { choices: Choices; onBooked: (booked: Booked) => void };
 
 export function AdjustForm({ choices, onBooked }: Props) {
   const post = usePost(adjustStock, { refreshes: ['today', 'shipments'] });
   const draft = useDraftForm({
-    schema: adjustmentForm,
+    schema: adjustDraft,
     name: 'adjust stock',
     defaultValues: { siteId: '', typeCode: '', on: choices.today, reason: '' },
   });

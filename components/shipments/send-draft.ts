@@ -1,9 +1,16 @@
 import { z } from 'zod';
-import { sendingForm } from '@/shared/contracts/shipments';
+import { mostLines, sendingForm } from '@/shared/contracts/shipments';
 import { addDays } from '@/shared/domain/calendar';
+import { text } from '@/shared/text/catalogue';
 
-/** The contract's form as it is typed: a reference left empty is none. */
+const line = sendingForm.shape.lines.element;
+
+/** The contract's form as it is typed: a reference left empty is none, a type not chosen is told as that. */
 export const sendDraft = sendingForm.extend({
+  lines: z
+    .array(line.extend({ typeCode: z.string().min(1, text.fields.choose).pipe(line.shape.typeCode) }))
+    .min(1)
+    .max(mostLines),
   reference: z.union([z.literal(''), sendingForm.shape.reference.unwrap()]),
 });
 export type SendDraft = z.output<typeof sendDraft>;
