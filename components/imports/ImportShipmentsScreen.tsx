@@ -56,12 +56,13 @@ const filters = [
 export function ImportShipmentsScreen({ id }: { id: string }) {
   const state = useListState({ filters: ['outcome'] });
   const list = useReadPages(listImportShipments, { params: { import: id }, query: state.query });
+  const shown = state.query.outcome === 'posted' ? columns.filter(({ key }) => key !== 'why') : columns;
   return (
     <Page title={words.head} back={{ href: `/imports/${id}`, label: text.imports.oneHead }}>
       <RecordList<ImportDocument>
         label={words.head}
         list={list}
-        columns={columns}
+        columns={shown}
         rowKey={(row) => String(row.rowNo)}
         state={state}
         filters={filters}
