@@ -2,6 +2,7 @@ import type { MoneyOf, PoolOfType, Today } from '@/shared/contracts/today';
 import { add } from '@/shared/domain/money';
 import { text } from '@/shared/text/catalogue';
 import { formatMoney } from '@/shared/text/format';
+import { useSignedIn } from '../data/use-session';
 import { Card } from '../ui/Card';
 import { Circuit } from '../ui/Circuit';
 
@@ -11,6 +12,7 @@ type Props = { pool: NonNullable<Today['pool']>; type: string; title?: string };
 
 /** The pool as one loop; each stretch opens what is in it. */
 export function PoolCard({ pool, type, title }: Props) {
+  const { may } = useSignedIn();
   const types = type === '' ? pool.types : pool.types.filter((each) => each.typeCode === type);
   const sum = (part: 'fulls' | 'empties' | 'partners' | 'plants' | 'inQuestion' | 'total') =>
     types.reduce((units, each) => units + each[part], 0);
@@ -36,7 +38,7 @@ export function PoolCard({ pool, type, title }: Props) {
           units: sum('inQuestion'),
           words: words.inQuestion.words(money),
           key: words.inQuestion.key,
-          href: '/shipments?state=differs',
+          href: may('see differences') ? '/differences' : '/shipments?state=differs',
         }}
         note={noteOf(types, sum('total'))}
       />

@@ -5,6 +5,7 @@ import { Problem } from '../data/Problem';
 import { useRead } from '../data/use-operation';
 import { useSignedIn } from '../data/use-session';
 import { useListState } from '../tables/use-list-state';
+import { useIsWide } from '../theme/use-breakpoint';
 import { Box } from '../ui/Box';
 import { Card } from '../ui/Card';
 import { EmptyState } from '../ui/EmptyState';
@@ -88,6 +89,7 @@ function Loading() {
 type WorklistProps = { today: Today; type: string; leadsWithPool: boolean };
 
 function Worklist({ today, type, leadsWithPool }: WorklistProps) {
+  const wide = useIsWide();
   const hasUnits = today.pool !== null && today.pool.types.length > 0;
   const waits = isWaiting(today);
   return (
@@ -97,7 +99,7 @@ function Worklist({ today, type, leadsWithPool }: WorklistProps) {
       <MonthEndCard today={today} />
       <LevelsCard today={today} />
       {today.differences ? (
-        <Box row wrap gap="l" align="start">
+        <Box row={wide} wrap={wide} gap="l" align={wide ? 'start' : 'stretch'}>
           <DifferencesCard today={today} />
           <RunningCard today={today} />
         </Box>
