@@ -49,7 +49,7 @@ function Issue({ statement }: { statement: string }) {
       <Button
         label={words.issue}
         full
-        busy={issue.isPending}
+        busy={issue.isPending || issue.isSuccess}
         onPress={() =>
           issue.mutate({ params: { statement } }, { onSuccess: () => announce(words.issueDone) })
         }
@@ -67,7 +67,7 @@ function Confirm({ statement }: { statement: string }) {
       <Button
         label={words.confirm}
         full
-        busy={confirm.isPending}
+        busy={confirm.isPending || confirm.isSuccess}
         onPress={() =>
           confirm.mutate({ params: { statement } }, { onSuccess: () => announce(words.confirmDone) })
         }
