@@ -1,5 +1,11 @@
-import { type ContainerTypeRow, listContainerTypes, typeKinds } from '@/shared/contracts/container-types';
+import {
+  type ContainerTypeRow,
+  downloadContainerTypes,
+  listContainerTypes,
+  typeKinds,
+} from '@/shared/contracts/container-types';
 import { text } from '@/shared/text/catalogue';
+import { urlOf } from '../data/url-of';
 import { useReadPages } from '../data/use-operation';
 import { useSignedIn } from '../data/use-session';
 import { RecordList } from '../tables/RecordList';
@@ -41,6 +47,7 @@ export function ContainerTypesScreen() {
         state={state}
         filters={filters}
         searchLabel={words.search}
+        downloads={[{ href: urlOf(downloadContainerTypes, { query: state.query }), label: text.ui.download }]}
         empty={{ ...words.empty, action: add }}
       />
     </Page>

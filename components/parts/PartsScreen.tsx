@@ -1,7 +1,8 @@
 import type { ReactNode } from 'react';
 import { listPool, type PoolRow } from '@/shared/contracts/pool';
-import { listPartChoices, listParts, type PartRow } from '@/shared/contracts/parts';
+import { downloadParts, listPartChoices, listParts, type PartRow } from '@/shared/contracts/parts';
 import { text } from '@/shared/text/catalogue';
+import { urlOf } from '../data/url-of';
 import { useRead, useReadPages } from '../data/use-operation';
 import { useSignedIn } from '../data/use-session';
 import { RecordList } from '../tables/RecordList';
@@ -59,6 +60,7 @@ function Parts({ add }: { add: ReactNode }) {
       state={state}
       filters={filters}
       searchLabel={words.search}
+      downloads={[{ href: urlOf(downloadParts, { query: state.query }), label: text.ui.download }]}
       empty={{ ...words.empty, action: add }}
     />
   );

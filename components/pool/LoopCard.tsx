@@ -39,7 +39,13 @@ export function LoopCard({ pool, reckoned, editing }: Props) {
           })}
         </Text>
       )}
-      <PlanFields editing={editing} />
+      {editing.mayPlan ? (
+        <PlanFields editing={editing} />
+      ) : (
+        <Text variant="soft">
+          {words.assumed({ ...editing.plan, travel: text.parts.assume[editing.plan.travel] })}
+        </Text>
+      )}
       {editing.mayPlan ? <Link href={`/parts/loops/${pool.type.code}`} label={words.changeLoop} /> : null}
       <SeenReckoning seen={pool.seen} />
     </Card>

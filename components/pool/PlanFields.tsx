@@ -14,7 +14,6 @@ const travelOptions = travelModes.map((mode) => ({ value: mode, label: text.part
 
 /** Buffer, cover and travel: turned here, reckoned at once, stored by a press. */
 export function PlanFields({ editing }: { editing: PlanEditing }) {
-  if (!editing.mayPlan) return null;
   return (
     <FormFrame
       draft={editing.draft}

@@ -1,5 +1,6 @@
-import { listPool, type PoolRow } from '@/shared/contracts/pool';
+import { downloadPool, listPool, type PoolRow } from '@/shared/contracts/pool';
 import { text } from '@/shared/text/catalogue';
+import { urlOf } from '../data/url-of';
 import { useReadPages } from '../data/use-operation';
 import { RecordList } from '../tables/RecordList';
 import { useListState } from '../tables/use-list-state';
@@ -22,6 +23,7 @@ export function PoolListScreen() {
         rowHref={(row) => `/pool/${row.type.code}`}
         state={state}
         searchLabel={words.search}
+        downloads={[{ href: urlOf(downloadPool, { query: state.query }), label: text.ui.download }]}
         empty={{
           title: words.empty.title,
           hint: words.empty.hint,

@@ -1,12 +1,13 @@
 import { PassThrough, type Readable } from 'node:stream';
 import ExcelJS from 'exceljs';
 import { cellText } from './cell-text';
-import { dayCell, dayFormat, unitsFormat } from './number-formats';
+import { dayCell, dayFormat, measureFormat, numberCell, unitsFormat } from './number-formats';
 
-/** A column of a list on a sheet: text, whole units or a day. */
+/** A column of a list on a sheet: text, whole units, a measured number or a day. */
 export type SheetColumn<Row> = { head: string; width?: number } & (
   | { text: (row: Row) => string }
   | { units: (row: Row) => number | null }
+  | { number: (row: Row) => number | string | null }
   | { day: (row: Row) => string | null }
 );
 
@@ -49,12 +50,17 @@ async function write<Row>({ name, columns, pages }: List<Row>, stream: PassThrou
 
 function formatOf<Row>(column: SheetColumn<Row>): string {
   if ('day' in column) return dayFormat;
+  if ('number' in column) return measureFormat;
   return 'units' in column ? unitsFormat : '@';
 }
 
 function valueOf<Row>(column: SheetColumn<Row>, row: Row): string | number | Date | null {
   if ('text' in column) return cellText(column.text(row));
   if ('units' in column) return column.units(row);
+  if ('number' in column) {
+    const value = column.number(row);
+    return value === null ? null : numberCell(value);
+  }
   const day = column.day(row);
   return day === null ? null : dayCell(day);
 }

@@ -5,6 +5,8 @@ export const unitsFormat = '#,##0';
 export const dayFormat = 'yyyy-mm-dd';
 /** As many decimals as a rate needs, up to six. */
 export const rateFormat = '0.00####';
+/** A measured figure (kilograms, days): up to six decimals, none that are 0. */
+export const measureFormat = '#,##0.######';
 export const percentFormat = '0.######';
 
 /** An amount with the decimals that ISO 4217 gives the currency. */

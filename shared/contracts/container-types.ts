@@ -72,17 +72,30 @@ export type ContainerType = z.infer<typeof containerType>;
 
 const typeParams = z.object({ type: code });
 
+const typesQuery = listQuery.extend({
+  kind: z.enum(typeKinds).optional(),
+  use: z.enum(['in use', 'out of use']).optional(),
+});
+
 export const listContainerTypes = operation({
   name: 'listContainerTypes',
   resource: 'container-types',
   method: 'GET',
   path: '/container-types',
   summary: 'Container types by name',
-  query: listQuery.extend({
-    kind: z.enum(typeKinds).optional(),
-    use: z.enum(['in use', 'out of use']).optional(),
-  }),
+  query: typesQuery,
   answer: pageOf(typeRow),
+});
+
+export const downloadContainerTypes = operation({
+  name: 'downloadContainerTypes',
+  resource: 'container-types',
+  method: 'GET',
+  path: '/container-types.xlsx',
+  summary: 'The same list as a spreadsheet',
+  query: typesQuery.omit({ after: true, limit: true }),
+  answers: 'file',
+  answer: z.unknown(),
 });
 
 export const readContainerType = operation({

@@ -39,14 +39,30 @@ export type PartRow = z.infer<typeof partRow>;
 
 const partParams = z.object({ part: id });
 
+const partsQuery = listQuery.extend({
+  type: code.optional(),
+  use: z.enum(['in use', 'out of use']).optional(),
+});
+
 export const listParts = operation({
   name: 'listParts',
   resource: 'parts',
   method: 'GET',
   path: '/parts',
   summary: 'Packing specifications by part number',
-  query: listQuery.extend({ type: code.optional(), use: z.enum(['in use', 'out of use']).optional() }),
+  query: partsQuery,
   answer: pageOf(partRow),
+});
+
+export const downloadParts = operation({
+  name: 'downloadParts',
+  resource: 'parts',
+  method: 'GET',
+  path: '/parts.xlsx',
+  summary: 'The same list as a spreadsheet',
+  query: partsQuery.omit({ after: true, limit: true }),
+  answers: 'file',
+  answer: z.unknown(),
 });
 
 export const readPart = operation({

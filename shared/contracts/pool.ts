@@ -37,6 +37,17 @@ export const listPool = operation({
   answer: pageOf(poolRow),
 });
 
+export const downloadPool = operation({
+  name: 'downloadPool',
+  resource: 'pool',
+  method: 'GET',
+  path: '/pool.xlsx',
+  summary: 'The same list as a spreadsheet',
+  query: listQuery.omit({ after: true, limit: true }),
+  answers: 'file',
+  answer: z.unknown(),
+});
+
 const approval = z.object({
   id,
   size: z.int(),

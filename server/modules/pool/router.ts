@@ -1,12 +1,17 @@
 import * as contracts from '@/shared/contracts/pool';
-import { post, read, type Route } from '../../http/route';
+import { file, post, read, type Route } from '../../http/route';
+import { operatorDay } from '../partners/operator-day';
 import { approvePoolSize } from './approve';
 import { poolPage } from './list-pool';
+import { poolWorkbook } from './pool-workbook';
 import { savePlanOf } from './plan-rows';
 import { approvalsPage, poolOfType, previewOf } from './read-pool';
 
 export const poolRoutes: Route[] = [
   read(contracts.listPool, 'see pool', ({ db, query }) => poolPage(db, query)),
+  file(contracts.downloadPool, 'see pool', async ({ db, query, at }) =>
+    poolWorkbook(db, { query, today: await operatorDay(db, at.now) }),
+  ),
   read(contracts.readPool, 'see pool', ({ db, params, at }) =>
     poolOfType(db, { typeCode: params.type, now: at.now }),
   ),

@@ -27,6 +27,11 @@ export const pool = {
     standing: 'Stands',
     sites: 'Sites outside their levels',
   },
+  typeCode: 'Code',
+  sitesUnder: 'Sites under their minimum',
+  sitesOver: 'Sites over their maximum',
+  loopDays: 'Loop, days',
+  perDay: 'Containers a day',
   short: (units: number) => `${formatUnits(units)} short`,
   above: (units: number) => `${formatUnits(units)} above`,
   asApproved: 'as approved',
@@ -87,6 +92,8 @@ export const pool = {
     elsewhere: 'Elsewhere',
   },
 
+  assumed: (plan: { bufferDays: string; coverPct: string; travel: string }) =>
+    `Buffer in days: ${plan.bufferDays}. Cover: ${plan.coverPct}\u202f%. They come back ${plan.travel}.`,
   buffer: 'Buffer, days',
   cover: 'Cover, %',
   comeBack: 'Come back',
