@@ -71,7 +71,11 @@ export const readBalance = operation({
   path: '/balances/:company/:type',
   summary: 'Units of one type that one company answers for, site by site',
   params: z.object({ company: id, type: code }),
-  query: z.object({ asOf: day.optional() }),
+  query: z.object({
+    asOf: day.optional(),
+    /** As it was known at this instant: entries recorded later are left out. */
+    knownAt: instant.optional(),
+  }),
   answer: balanceRow.extend({
     asOf: day.nullable(),
     today: day,

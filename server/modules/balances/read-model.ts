@@ -7,7 +7,8 @@ import type { AnswerOf, ParamsOf, QueryOf } from '@/shared/contracts/operation';
 import { Problem } from '@/shared/problems/problems';
 import { type Person, scopeOf } from '../../http/person';
 import { netsOf } from './parts-sql';
-import { type Parts, type PartsByCompany, unitsByCompany } from './units-by-company';
+import { type SiteUnits, unitsAsKnown } from './units-as-known';
+import { noUnits, type Parts, type PartsByCompany, unitsByCompany } from './units-by-company';
 
 type Company = typeof companies.$inferSelect;
 type Listing = { query: QueryOf<typeof listBalances>; person: Person; today: string };
@@ -70,7 +71,7 @@ function rowsOf(made: Made): BalanceRow[] {
   );
 }
 
-type OfType = { typeCode: string; typeName: string | undefined; parts: Parts };
+type OfType = { typeCode: string; typeName: string | undefined; parts: Readonly<Parts> };
 
 function rowOf({ id, name, kind }: Company, { typeCode, typeName, parts }: OfType): BalanceRow {
   return { companyId: id, company: name, kind, typeCode, typeName: typeName ?? typeCode, ...parts };
@@ -92,24 +93,27 @@ type One = {
 export async function oneBalance(db: Reader, one: One): Promise<AnswerOf<typeof readBalance>> {
   const { company, name } = await visibleBalance(db, one);
   const { type } = one.params;
-  const { asOf } = one.query;
-  const units = await unitsByCompany(db, { companyIds: [company.id], asOf, type });
-  const parts = units.get(company.id)?.get(type);
-  const none: Parts = {
-    atSites: 0,
-    sent: 0,
-    sentDiffers: 0,
-    toIt: 0,
-    toItDiffers: 0,
-    inQuestion: 0,
-    held: 0,
-  };
+  const { asOf, knownAt } = one.query;
+  const asked = { companyId: company.id, type, asOf };
+  const { parts, sites: bySite } =
+    knownAt === undefined ? await unitsAsKept(db, asked) : await unitsAsKnown(db, { ...asked, knownAt });
   return {
-    ...rowOf(company, { typeCode: type, typeName: name, parts: parts ?? none }),
-    sites: await unitsBySite(db, { companyId: company.id, type, asOf }),
+    ...rowOf(company, { typeCode: type, typeName: name, parts }),
+    sites: bySite,
     asOf: asOf ?? null,
     today: one.today,
   };
+}
+
+type Asked = { companyId: string; type: string; asOf: string | undefined };
+
+async function unitsAsKept(
+  db: Reader,
+  asked: Asked,
+): Promise<{ parts: Readonly<Parts>; sites: SiteUnits[] }> {
+  const { companyId, type, asOf } = asked;
+  const units = await unitsByCompany(db, { companyIds: [companyId], asOf, type });
+  return { parts: units.get(companyId)?.get(type) ?? noUnits, sites: await unitsBySite(db, asked) };
 }
 
 /** The company and the type that are asked about, if this person may see them. */
@@ -124,9 +128,7 @@ export async function visibleBalance(
   return { company, name: type.name };
 }
 
-type BySite = { companyId: string; type: string; asOf: string | undefined };
-
-async function unitsBySite(db: Reader, { companyId, type, asOf }: BySite) {
+async function unitsBySite(db: Reader, { companyId, type, asOf }: Asked): Promise<SiteUnits[]> {
   const { table, units, until } = netsOf(asOf);
   const [rows] = await db.execute(
     sql`select a.site_id as siteId, st.name as site, sum(${units}) as units

@@ -15,7 +15,7 @@ export async function unitsByCompany(db: Reader, asked: Asked): Promise<PartsByC
   const add = (at: { company: string; type: string }, part: keyof Parts, units: number): void => {
     const types = found.get(at.company);
     if (!types) return;
-    const parts = types.get(at.type) ?? nothing();
+    const parts = types.get(at.type) ?? { ...noUnits };
     parts[part] += units;
     types.set(at.type, parts);
   };
@@ -40,9 +40,15 @@ export async function unitsByCompany(db: Reader, asked: Asked): Promise<PartsByC
   return found;
 }
 
-function nothing(): Parts {
-  return { atSites: 0, sent: 0, sentDiffers: 0, toIt: 0, toItDiffers: 0, inQuestion: 0, held: 0 };
-}
+export const noUnits: Readonly<Parts> = {
+  atSites: 0,
+  sent: 0,
+  sentDiffers: 0,
+  toIt: 0,
+  toItDiffers: 0,
+  inQuestion: 0,
+  held: 0,
+};
 
 type SiteUnits = { companyId: string; typeCode: string; units: string };
 

@@ -93,6 +93,25 @@ describe('balances', () => {
     expect(after.map((now, index) => now.atSites - (before[index]?.atSites ?? 0))).toEqual([0, 30, 30, 30]);
   });
 
+  it('are told as they were known at an instant, whatever was recorded later', async () => {
+    // Entries carry the instant of the database itself, not that of the tests' clock.
+    const instant = async () => {
+      const [rows] = await product.deps.pool.query('SELECT UTC_TIMESTAMP(3) AS at, SLEEP(0.05)');
+      return `${(rows as { at: string }[])[0]?.at.replace(' ', 'T')}Z`;
+    };
+    const before = await instant();
+    const id = await sentEmpties(lane, load(50));
+    const sent = await instant();
+    await lane.clerk.post(`/shipments/${id}/counts`, counted(load(44)));
+    const after = await instant();
+    const known = (knownAt: string) => figures(lane.coordinator, lane.partner, { knownAt });
+    expect(await known(before)).toEqual(none);
+    expect(await known(sent)).toEqual({ ...none, toIt: 50 });
+    expect(await known(after)).toEqual(await figures(lane.coordinator, lane.partner));
+    const dated = { knownAt: after, asOf: '2026-03-19' };
+    expect(await figures(lane.coordinator, lane.partner, dated)).toEqual(none);
+  });
+
   it('are listed company by company, and a partner’s own only', async () => {
     const id = await sentEmpties(lane, load(10));
     const other = await product.aCompany({ name: 'Pallwick Fasteners' });
