@@ -107,7 +107,7 @@ const decidedLines = (id: string, numbers: ImportNumbers): Line[] => [
   { label: words.duplicates, units: numbers.duplicates, href: `/imports/${id}/receipts?state=duplicate` },
 ];
 
-const openLines = ({ waiting, overdue }: ImportNumbers): Line[] => [
+const openLines = ({ onTheWay, overdue }: ImportNumbers): Line[] => [
+  { label: words.onTheWay, units: onTheWay, href: '/shipments?state=on+the+way' },
   { label: words.overdue, units: overdue, href: '/shipments?state=overdue' },
-  { label: words.waiting, units: waiting, href: '/shipments?state=on+the+way' },
 ];

@@ -128,8 +128,8 @@ export const importNumbers = z.object({
   duplicates: whole,
   unannounced: whole,
   booked: whole,
-  /** Shipments of the whole book that no receipt was found for. */
-  waiting: whole,
+  /** Shipments of the whole book that nobody has counted, and how many of them are overdue. */
+  onTheWay: whole,
   overdue: whole,
 });
 export type ImportNumbers = z.infer<typeof importNumbers>;

@@ -44,7 +44,10 @@ const headOf = (held: typeof imports.$inferSelect, by: string | null): ImportRow
 
 const confirmers = alias(people, 'confirmers');
 
-export async function readImportDetail(db: Reader, id: string): Promise<ImportDetail> {
+export async function readImportDetail(
+  db: Reader,
+  { id, today }: { id: string; today: string },
+): Promise<ImportDetail> {
   const [row] = await db
     .select({ held: imports, by: people.name, confirmedBy: confirmers.name, job: jobs })
     .from(imports)
@@ -62,7 +65,7 @@ export async function readImportDetail(db: Reader, id: string): Promise<ImportDe
     confirmedBy,
     confirmedAt: held.confirmedAt,
     endedAt: held.endedAt,
-    numbers: held.state === 'done' ? await numbersOf(db, held) : null,
+    numbers: held.state === 'done' ? await numbersOf(db, { importId: id, today }) : null,
   };
 }
 

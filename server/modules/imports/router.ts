@@ -39,7 +39,9 @@ export const importRoutes: Route[] = [
   post(uploadOperation, ability, ({ tx, files, person, at }) =>
     uploadImport(tx, { files, person, now: at.now }),
   ),
-  read(readImport, ability, ({ db, params }) => readImportDetail(db, params.import)),
+  read(readImport, ability, async ({ db, params, at }) =>
+    readImportDetail(db, { id: params.import, today: dayInZone(at.now, await operatorZone(db)) }),
+  ),
   read(listRowsOperation, ability, async ({ db, params, query }) => {
     const { id } = await importHead(db, params.import);
     return pageOfRows(db, { ...query, importId: id });

@@ -27,7 +27,7 @@ describe('a confirmed file', () => {
     const numbers = await numbersOf(id);
     expect(numbers.shipments).toEqual({ posted: 2, known: 0, refused: 0 });
     expect(numbers.matches).toEqual([{ rule: 'same reference', groups: 1 }]);
-    expect(numbers).toMatchObject({ waiting: 0, overdue: 1, unannounced: 0, duplicates: 0 });
+    expect(numbers).toMatchObject({ onTheWay: 1, overdue: 1, unannounced: 0, duplicates: 0 });
     const [lines] = await scene.product.deps.pool.query(
       `SELECT l.type_code, l.counted, l.damaged, l.dirty, c.source, s.origin, s.state
          FROM count_lines l JOIN counts c ON c.id = l.count_id JOIN shipments s ON s.id = c.shipment_id
