@@ -109,4 +109,22 @@ describe('a correction that reaches back into a closed month', () => {
     const { content } = await statementOf('2026-04');
     expect(content.lines.map((line: Line) => line.accountMonth)).toEqual(['2026-04']);
   });
+
+  it('opens its opening figure down to what came before the month, corrections included', async () => {
+    const { id, content } = await statementOf('2026-03');
+    const asked = { type: scene.tote.code, before: 'yes' };
+    const { body } = await scene.finance.get(`/statements/${id}/movements`, asked);
+    const quantities = body.rows.map((row: { quantity: number }) => row.quantity);
+    expect(quantities).toEqual([392, 8]);
+    expect(content.assessment.lines[0].units.opening).toBe(400);
+  });
+
+  it('opens all lines of a component, of the month or of the month that is corrected', async () => {
+    const { id } = await statementOf('2026-03');
+    const path = `/statements/${id}/movements`;
+    const own = await scene.finance.get(path, { component: 'daily fee' });
+    expect(own.body.rows).toEqual([]);
+    const corrected = await scene.finance.get(path, { component: 'daily fee', corrects: '2026-02' });
+    expect(corrected.body.rows).toMatchObject([{ kind: 'corrected', quantity: 8 }]);
+  });
 });
