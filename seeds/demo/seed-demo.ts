@@ -4,6 +4,7 @@ import { outbox } from '@/db/schema/work';
 import { outsideAccount, siteAccount } from '@/server/modules/ledger/accounts';
 import { postEntry } from '@/server/modules/ledger/post-entry';
 import { addDays, firstDayOfMonth, lastDayOfMonth, monthOf, previousMonth } from '@/shared/domain/calendar';
+import { approvePools } from './approve-pools';
 import { bookOf } from './book';
 import { disputeLoss, loseAtKestrel, playDisputes } from './disputes';
 import { playEpisodes } from './episodes';
@@ -41,6 +42,7 @@ export async function seedDemo(db: Database, { today, say }: Demo): Promise<void
     if (day.endsWith('-04')) await turnOfMonth(world, { day, openMonth, lastClosed });
     if (day === lastDayOfMonth(day.slice(0, 7))) say(`moved through ${monthOf(day)}`);
   }
+  await approvePools(world.book, { on: today });
   await disputeLoss(world.book, { month: lastClosed, on: `${openMonth}-10` });
   await playEpisodes(world.book, today);
   await playDisputes(world.book, today);
