@@ -1,4 +1,4 @@
-import { and, desc, eq, lte } from 'drizzle-orm';
+import { and, desc, eq, lte, sql } from 'drizzle-orm';
 import { v7 as newId } from 'uuid';
 import type { Transaction } from '@/db/client';
 import { companies, terms } from '@/db/schema/companies';
@@ -66,6 +66,7 @@ function notWholeMinor(version: TermsVersion, currency: string): BadField[] {
 }
 
 async function inClosedMonth(tx: Transaction, partner: Partner, version: TermsVersion): Promise<BadField[]> {
+  await waitForClose(tx, monthOf(version.validFrom));
   const closedThrough = await lastClosedMonth(tx);
   if (closedThrough === null || monthOf(version.validFrom) > closedThrough) return [];
   const [before] = await tx
@@ -84,7 +85,12 @@ async function inClosedMonth(tx: Transaction, partner: Partner, version: TermsVe
   return [{ path: 'validFrom', message }];
 }
 
-/** The latest closed month; a shared lock is not needed, since closing twice in between changes nothing assessed. */
+/** A close under way comes first: its drafts must not be made from terms that were set meanwhile. */
+async function waitForClose(tx: Transaction, month: string): Promise<void> {
+  await tx.execute(sql`select state from ${months} where ${months.month} = ${month} lock in share mode`);
+}
+
+/** The latest closed month, if any. */
 export async function lastClosedMonth(tx: Pick<Transaction, 'select'>): Promise<string | null> {
   const [row] = await tx
     .select({ month: months.month })
