@@ -4,9 +4,10 @@ import type { Transaction } from '@/db/client';
 import { imports, receiptMatches, receipts } from '@/db/schema/work';
 import { inTransaction } from '@/db/transaction';
 import { dayInZone } from '@/shared/domain/calendar';
-import { reconcile, type Reconciliation, type ReconciliationInput } from '@/shared/domain/reconciliation';
+import type { Reconciliation, ReconciliationInput } from '@/shared/domain/reconciliation';
 import { countedBefore } from './counted-before';
 import { openReceipts, openShipments, operatorZone } from './open-papers';
+import { reconcileApart } from './reconcile-apart';
 import type { Run } from './run-import';
 import { namesIn } from './why-in-words';
 
@@ -28,7 +29,7 @@ export async function planMatches(run: Run): Promise<void> {
     shipments: await openShipments(deps.db),
     receipts: await openReceipts(deps.db, importId),
   };
-  const outcome = reconcile(input);
+  const outcome = await reconcileApart(input);
   await inTransaction(deps.db, (tx) => keepPlan(tx, { importId, input, outcome }));
 }
 
