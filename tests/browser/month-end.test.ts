@@ -190,5 +190,5 @@ journey('nothing is posted into the closed month, and what was typed stays', asy
   await ane.isInOrder();
   await ane.write('On', today());
   await ane.press('Book it');
-  await ane.sees(/Booked 4 units under entry/);
+  await ane.sees(/Booked 4 under entry/);
 });
