@@ -24,8 +24,7 @@ export function EntriesCard({ shipment }: { shipment: ShipmentDetail }) {
               {entry.lines.map((line, at) => (
                 <Text key={at}>
                   {words.move(
-                    line.units,
-                    line.typeName,
+                    words.moved(line.units, line.typeName),
                     text.balances.place(line.from),
                     text.balances.place(line.to),
                   )}

@@ -74,8 +74,8 @@ export const shipments = {
   dispute: 'Dispute this count',
   entriesHead: 'Entries in the book',
   entry: (id: number, kind: string) => `Entry ${formatUnits(id)}: ${kind}`,
-  move: (units: number, type: string, from: string, to: string) =>
-    `${formatUnits(units)} ${type}: ${from} → ${to}`,
+  moved: (units: number, type: string) => `${formatUnits(units)} ${type}`,
+  move: (what: string, from: string, to: string) => `${what}: ${from} → ${to}`,
 
   sendLead: {
     empties: 'The partner sees the shipment at once and is told by e-mail.',
