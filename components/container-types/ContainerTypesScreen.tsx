@@ -30,7 +30,7 @@ const filters = [
 ];
 
 export function ContainerTypesScreen() {
-  const state = useListState({ filters: ['kind', 'use'] });
+  const state = useListState({ filters: ['kind', 'use'], sort: 'name' });
   const list = useReadPages(listContainerTypes, { query: state.query });
   const { may } = useSignedIn();
   const add = may('keep container types') ? (

@@ -8,8 +8,8 @@ import { Tag } from '../ui/Tag';
 const words = text.containerTypes;
 
 export const typeColumns: readonly Column<ContainerTypeRow>[] = [
-  { key: 'name', head: words.columns.name, cell: (row) => row.name, cardRole: 'title' },
-  { key: 'code', head: words.columns.code, cell: (row) => row.code },
+  { key: 'name', head: words.columns.name, cell: (row) => row.name, cardRole: 'title', sortable: true },
+  { key: 'code', head: words.columns.code, cell: (row) => row.code, sortable: true },
   { key: 'kind', head: words.columns.kind, cell: (row) => words.kinds[row.kind] },
   { key: 'size', head: words.columns.size, cell: words.size, align: 'end' },
   { key: 'tare', head: words.columns.tare, cell: (row) => formatDecimal(row.tareKg), align: 'end' },

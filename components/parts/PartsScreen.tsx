@@ -34,7 +34,7 @@ export function PartsScreen() {
 }
 
 function Parts({ add }: { add: ReactNode }) {
-  const state = useListState({ filters: ['type', 'use'] });
+  const state = useListState({ filters: ['type', 'use'], sort: 'number' });
   const list = useReadPages(listParts, { query: state.query });
   const { data: choices } = useRead(listPartChoices);
   const { may } = useSignedIn();

@@ -14,6 +14,7 @@ export const partColumns: readonly Column<PartRow>[] = [
     head: words.columns.number,
     cell: (row) => words.partName(row.number, row.name),
     cardRole: 'title',
+    sortable: true,
   },
   { key: 'type', head: words.columns.type, cell: (row) => row.type.name },
   {

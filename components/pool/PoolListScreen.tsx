@@ -11,7 +11,7 @@ import { poolColumns } from './pool-columns';
 const words = text.pool;
 
 export function PoolListScreen() {
-  const state = useListState();
+  const state = useListState({ sort: 'type' });
   const list = useReadPages(listPool, { query: state.query });
   return (
     <Page title={words.title} lead={words.lead}>

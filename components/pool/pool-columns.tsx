@@ -8,7 +8,7 @@ import { Text } from '../ui/Text';
 const words = text.pool;
 
 export const poolColumns: readonly Column<PoolRow>[] = [
-  { key: 'type', head: words.columns.type, cell: (row) => row.type.name, cardRole: 'title' },
+  { key: 'type', head: words.columns.type, cell: (row) => row.type.name, cardRole: 'title', sortable: true },
   {
     key: 'inPool',
     head: words.columns.inPool,

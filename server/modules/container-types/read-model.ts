@@ -1,4 +1,4 @@
-import { and, asc, eq, gt, like, or } from 'drizzle-orm';
+import { and, asc, eq, like, or } from 'drizzle-orm';
 import type { MySqlColumn } from 'drizzle-orm/mysql-core';
 import type { Reader } from '@/db/client';
 import { companies } from '@/db/schema/companies';
@@ -11,14 +11,16 @@ import { unitsPerLayer } from '@/shared/domain/unit-load';
 import { Problem } from '@/shared/problems/problems';
 import { cursor, cutPage } from '../../http/page';
 import { likeText } from '../../http/search';
+import { keyset, sortOf } from '../../http/sort';
 import { hasBeenMoved } from './moved';
 
 type TypeRow = typeof containerTypes.$inferSelect;
 
-/** Container types by name, a page by key. */
+/** Container types by name or code, a page by key. */
 export async function typesPage(db: Reader, query: QueryOf<typeof listContainerTypes>) {
-  const after = cursor(query.after, 2);
   const { name, code } = containerTypes;
+  const { key, down } = sortOf(query.sort, ['name', 'code']);
+  const page = keyset({ by: containerTypes[key], then: code, down, after: cursor(query.after, 2) });
   const rows = await db
     .select()
     .from(containerTypes)
@@ -27,12 +29,12 @@ export async function typesPage(db: Reader, query: QueryOf<typeof listContainerT
         query.kind ? eq(containerTypes.kind, query.kind) : undefined,
         query.use ? eq(containerTypes.active, query.use === 'in use') : undefined,
         query.search ? or(like(name, likeText(query.search)), like(code, likeText(query.search))) : undefined,
-        after ? or(gt(name, after[0]), and(eq(name, after[0]), gt(code, after[1]))) : undefined,
+        page.after,
       ),
     )
-    .orderBy(asc(name), asc(code))
+    .orderBy(...page.order)
     .limit(query.limit + 1);
-  return cutPage(rows.map(plainWeights), query.limit, (row) => [row.name, row.code]);
+  return cutPage(rows.map(plainWeights), query.limit, (row) => [row[key], row.code]);
 }
 
 /** One type with its packing and what is reckoned from its figures. */

@@ -1,4 +1,4 @@
-import { and, asc, eq, gt, like, or, type SQL } from 'drizzle-orm';
+import { and, asc, eq, like, or, type SQL } from 'drizzle-orm';
 import { alias } from 'drizzle-orm/mysql-core';
 import type { Reader } from '@/db/client';
 import { companies, sites } from '@/db/schema/companies';
@@ -9,38 +9,42 @@ import { plainDecimal } from '@/shared/domain/plain-decimal';
 import { Problem } from '@/shared/problems/problems';
 import { cursor, cutPage } from '../../http/page';
 import { likeText } from '../../http/search';
+import { keyset, sortOf } from '../../http/sort';
 
 const supplier = alias(sites, 'supplier_site');
 const supplierCompany = alias(companies, 'supplier_company');
 const plant = alias(sites, 'plant_site');
 const plantCompany = alias(companies, 'plant_company');
 
-/** Packing specifications by part number, a page by key. */
+/** Packing specifications by part number or name, a page by key. */
 export async function partsPage(db: Reader, query: QueryOf<typeof listParts>) {
-  const after = cursor(query.after, 2);
+  const { key, down } = sortOf(query.sort, ['number', 'name']);
+  const page = keyset({ by: parts[key], then: parts.id, down, after: cursor(query.after, 2) });
   const rows = await partRows(db, {
     limit: query.limit + 1,
+    order: page.order,
     where: and(
       query.type ? eq(parts.typeCode, query.type) : undefined,
       query.use ? eq(parts.active, query.use === 'in use') : undefined,
       query.search
         ? or(like(parts.number, likeText(query.search)), like(parts.name, likeText(query.search)))
         : undefined,
-      after
-        ? or(gt(parts.number, after[0]), and(eq(parts.number, after[0]), gt(parts.id, after[1])))
-        : undefined,
+      page.after,
     ),
   });
-  return cutPage(rows, query.limit, (row) => [row.number, row.id]);
+  return cutPage(rows, query.limit, (row) => [row[key], row.id]);
 }
 
 export async function readPartRow(db: Reader, id: string): Promise<PartRow> {
-  const [row] = await partRows(db, { where: eq(parts.id, id), limit: 1 });
+  const [row] = await partRows(db, { where: eq(parts.id, id), order: [], limit: 1 });
   if (!row) throw new Problem('not found');
   return row;
 }
 
-async function partRows(db: Reader, asked: { where: SQL | undefined; limit: number }): Promise<PartRow[]> {
+async function partRows(
+  db: Reader,
+  asked: { where: SQL | undefined; order: SQL[]; limit: number },
+): Promise<PartRow[]> {
   const rows = await db
     .select({
       part: parts,
@@ -55,7 +59,7 @@ async function partRows(db: Reader, asked: { where: SQL | undefined; limit: numb
     .innerJoin(plant, eq(plant.id, parts.plantSiteId))
     .innerJoin(plantCompany, eq(plantCompany.id, plant.companyId))
     .where(asked.where)
-    .orderBy(asc(parts.number), asc(parts.id))
+    .orderBy(...asked.order)
     .limit(asked.limit);
   return rows.map(({ part, ...named }) => ({
     ...named,

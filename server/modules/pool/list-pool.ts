@@ -1,4 +1,4 @@
-import { and, asc, eq, gt, inArray, like, or } from 'drizzle-orm';
+import { and, eq, inArray, like, or } from 'drizzle-orm';
 import type { Reader } from '@/db/client';
 import { containerTypes } from '@/db/schema/containers';
 import type { listPool, PoolRow } from '@/shared/contracts/pool';
@@ -8,6 +8,7 @@ import type { PoolInput, PoolSize } from '@/shared/domain/pool-size';
 import { Problem } from '@/shared/problems/problems';
 import { cursor, cutPage } from '../../http/page';
 import { likeText } from '../../http/search';
+import { keyset, sortOf } from '../../http/sort';
 import { unitsInPool } from './in-pool';
 import { latestApprovals } from './latest-approvals';
 import { sitesOutOfLevel } from './levels';
@@ -16,10 +17,11 @@ import { sizeOf } from './reckon';
 
 /** Types by name, a page by key: those in use, and those out of use of which the pool still holds units. */
 export async function poolPage(db: Reader, query: QueryOf<typeof listPool>) {
-  const after = cursor(query.after, 2);
   const inPool = await unitsInPool(db);
   const held = [...inPool].filter(([, units]) => units !== 0).map(([code]) => code);
   const { name, code, kind } = containerTypes;
+  const { down } = sortOf(query.sort, ['type']);
+  const page = keyset({ by: name, then: code, down, after: cursor(query.after, 2) });
   const types = await db
     .select({ code, name, kind })
     .from(containerTypes)
@@ -29,10 +31,10 @@ export async function poolPage(db: Reader, query: QueryOf<typeof listPool>) {
           ? or(eq(containerTypes.active, true), inArray(code, held))
           : eq(containerTypes.active, true),
         query.search ? or(like(name, likeText(query.search)), like(code, likeText(query.search))) : undefined,
-        after ? or(gt(name, after[0]), and(eq(name, after[0]), gt(code, after[1]))) : undefined,
+        page.after,
       ),
     )
-    .orderBy(asc(name), asc(code))
+    .orderBy(...page.order)
     .limit(query.limit + 1);
   const facts = await factsOf(db, inPool);
   return cutPage(

@@ -79,7 +79,7 @@ export const containerTypes = {
     head: { what: 'Load', weight: 'Weight', from: 'Reckoned from' },
   },
   handling: {
-    title: (kilograms: string) => `${kg(kilograms)} to lift by hand`,
+    title: (kilograms: string) => `Lifting by hand: ${kg(kilograms)}`,
     full: 'A full one weighs more than 25 kg.',
     empty: 'Even an empty one weighs more than 25 kg.',
     source:

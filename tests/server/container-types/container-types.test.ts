@@ -168,20 +168,24 @@ describe('a container type', () => {
     const lids = await engineer.get('/container-types', { kind: 'lid' });
     expect(lids.body.rows.map((row: { code: string }) => row.code)).toEqual([lane.lid.code]);
     const all = (await engineer.get('/container-types')).body.rows.map((row: { code: string }) => row.code);
-    const paged: string[] = [];
-    let after: string | null = '';
-    while (after !== null) {
-      const page: { body: { rows: { code: string }[]; next: string | null } } = await engineer.get(
-        '/container-types',
-        {
-          limit: '2',
-          ...(after === '' ? {} : { after }),
-        },
-      );
-      paged.push(...page.body.rows.map((row) => row.code));
-      after = page.body.next;
-    }
-    expect(paged).toEqual(all);
+    expect(await pagedCodes()).toEqual(all);
+    const down = await pagedCodes({ sort: '-code' });
+    expect(down).toEqual([...all].sort().reverse());
+    const strange = await engineer.get('/container-types', { sort: 'colour' });
+    expect([strange.status, strange.body.fields[0].path]).toEqual([400, 'sort']);
     expect(all.length).toBeGreaterThan(4);
   });
 });
+
+/** The list to its end, two at a time. */
+async function pagedCodes(query: Record<string, string> = {}): Promise<string[]> {
+  const codes: string[] = [];
+  let after: string | null = '';
+  while (after !== null) {
+    const key: Record<string, string> = after === '' ? {} : { after };
+    const { body } = await engineer.get('/container-types', { ...query, limit: '2', ...key });
+    codes.push(...body.rows.map((row: { code: string }) => row.code));
+    after = body.next as string | null;
+  }
+  return codes;
+}
