@@ -146,6 +146,43 @@ export async function playDisputes(book: Book, today: string): Promise<void> {
   });
 }
 
+/** A load of fulls from Kestrel, counted 8 short in a month that closes soon after. */
+export function countShortBeforeClose(book: Book, leftOn: string): Promise<string> {
+  return countedShort(book, {
+    from: 'KESTREL',
+    to: 'TARNBY',
+    typeCode: 'TOTE-64',
+    declared: 400,
+    counted: 392,
+    leftOn,
+  });
+}
+
+/** After the close the count is disputed and put right: the next statement carries the correction. */
+export async function putRightAfterClose(
+  book: Book,
+  { shipmentId, on }: { shipmentId: string; on: string },
+): Promise<void> {
+  const disputeId = await open(
+    book,
+    { email: 'inge@kestrel.example', on },
+    {
+      subject: 'count',
+      shipmentId,
+      typeCode: 'TOTE-64',
+      claimed: 400,
+      reason: 'counted wrongly',
+      text: 'The note signed at your gate says 400.',
+    },
+  );
+  await answer(book, {
+    disputeId,
+    on: addDays(on, 2),
+    step: 'accept',
+    text: 'The gate has the same note. We put the count right.',
+  });
+}
+
 /** Twelve totes that a stocktake at Kestrel did not find. */
 export async function loseAtKestrel(book: Book, on: string): Promise<void> {
   await book.onDay((tx) =>

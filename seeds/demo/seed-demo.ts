@@ -6,7 +6,13 @@ import { postEntry } from '@/server/modules/ledger/post-entry';
 import { addDays, firstDayOfMonth, lastDayOfMonth, monthOf, previousMonth } from '@/shared/domain/calendar';
 import { approvePools } from './approve-pools';
 import { bookOf } from './book';
-import { disputeLoss, loseAtKestrel, playDisputes } from './disputes';
+import {
+  countShortBeforeClose,
+  disputeLoss,
+  loseAtKestrel,
+  playDisputes,
+  putRightAfterClose,
+} from './disputes';
 import { playEpisodes } from './episodes';
 import { endMonth } from './month-end';
 import { drawsFrom } from './random';
@@ -36,8 +42,11 @@ export async function seedDemo(db: Database, { today, say }: Demo): Promise<void
   };
   await openTheBook(world, opened);
   const lastClosed = backBy(openMonth, 1);
+  let counted = '';
   for (let day = opened; day <= today; day = addDays(day, 1)) {
     await liveDay(world, day, { settle: day <= addDays(today, -8) });
+    if (day === `${previousMonth(lastClosed)}-23`) counted = await countShortBeforeClose(world.book, day);
+    if (day === `${lastClosed}-08`) await putRightAfterClose(world.book, { shipmentId: counted, on: day });
     if (day === `${lastClosed}-20`) await loseAtKestrel(world.book, day);
     if (day.endsWith('-04')) await turnOfMonth(world, { day, openMonth, lastClosed });
     if (day === lastDayOfMonth(day.slice(0, 7))) say(`moved through ${monthOf(day)}`);
