@@ -39,7 +39,11 @@ module.exports = {
       preset: 'jest-expo/web',
       testMatch: ['<rootDir>/tests/components/**/*.test.tsx'],
       setupFilesAfterEnv: ['<rootDir>/tests/support/components-setup.ts'],
-      moduleNameMapper: { ...web.moduleNameMapper, '^@/(.*)$': '<rootDir>/$1', '\\.css$': '<rootDir>/tests/support/empty-style.js' },
+      moduleNameMapper: {
+        ...web.moduleNameMapper,
+        '^@/(.*)$': '<rootDir>/$1',
+        '\\.css$': '<rootDir>/tests/support/empty-style.js',
+      },
       transformIgnorePatterns: [
         web.transformIgnorePatterns[0].replace('(?!(', '(?!(d3-|internmap|uuid|@tanstack/|'),
         ...web.transformIgnorePatterns.slice(1),

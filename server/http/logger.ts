@@ -1,6 +1,13 @@
 import { type DestinationStream, type Logger, pino } from 'pino';
 
-type ErrorLike = { raw?: unknown; name?: unknown; message?: unknown; stack?: unknown; code?: unknown; cause?: unknown };
+type ErrorLike = {
+  raw?: unknown;
+  name?: unknown;
+  message?: unknown;
+  stack?: unknown;
+  code?: unknown;
+  cause?: unknown;
+};
 
 /** The program's log. Headers and the values of failed statements stay out of it: they hold cookies, hashes, links. */
 export function loggerOf(level: string, destination?: DestinationStream): Logger {

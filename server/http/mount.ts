@@ -1,4 +1,5 @@
 import { type Request, type Response, Router } from 'express';
+import { once } from 'node:events';
 import { pipeline } from 'node:stream/promises';
 import { Readable } from 'node:stream';
 import { inTransaction } from '@/db/transaction';
@@ -67,9 +68,17 @@ async function handedOut(
   { call, person, at, deps }: HandingOut,
 ): Promise<FileAnswer> {
   const answer = await route.handle(call);
+  if (!Buffer.isBuffer(answer.content)) await begun(answer.content);
   const subject = subjectOf(route, call, null);
   await writeLog(deps.db, { at, person, action: route.operation.name, outcome: 'done', subject });
   return answer;
+}
+
+/** Waits for the first bytes: what is refused while they are made is then answered like any other refusal. */
+async function begun(content: Readable): Promise<void> {
+  // An error in the moments when nobody reads would end the program.
+  content.on('error', () => undefined);
+  if (content.readableLength === 0 && !content.readableEnded) await once(content, 'readable');
 }
 
 type Change = Exchange & { at: Circumstances; person: Person; files: UploadedFile[] };

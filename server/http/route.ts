@@ -2,7 +2,7 @@ import type { Request, Response } from 'express';
 import type { Readable } from 'node:stream';
 import type { Database, Transaction } from '@/db/client';
 import type { Ability } from '@/shared/access/abilities';
-import type { AnswerOf, BodyOf, Operation, ParamsOf, QueryOf } from '@/shared/contracts/operation';
+import type { AnswerOf, BodyOf, Operation, ParamsOf, QueryOf, Shaped } from '@/shared/contracts/operation';
 import type { Deps } from '../deps';
 import type { Person } from './person';
 
@@ -11,17 +11,22 @@ export type UploadedFile = { field: string; name: string; mediaType: string; byt
 /** Who asks, from where and when. */
 export type Circumstances = { requestId: string; address: string; now: string; key?: string };
 
-type Parsed<O> = { params: ParamsOf<O>; query: QueryOf<O>; body: BodyOf<O> };
-export type ReadCall<O> = Parsed<O> & { db: Database; person: Person; deps: Deps; at: Circumstances };
+type Parsed<O extends Shaped> = { params: ParamsOf<O>; query: QueryOf<O>; body: BodyOf<O> };
+export type ReadCall<O extends Shaped> = Parsed<O> & {
+  db: Database;
+  person: Person;
+  deps: Deps;
+  at: Circumstances;
+};
 /** `tx` is the one transaction of the request: the effect, the log row and the stored answer commit together. */
-export type PostCall<O> = Parsed<O> & {
+export type PostCall<O extends Shaped> = Parsed<O> & {
   tx: Transaction;
   person: Person;
   deps: Deps;
   at: Circumstances;
   files: UploadedFile[];
 };
-export type OpenCall<O> = Parsed<O> & {
+export type OpenCall<O extends Shaped> = Parsed<O> & {
   db: Database;
   deps: Deps;
   at: Circumstances;

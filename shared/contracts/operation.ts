@@ -48,9 +48,13 @@ export function operation<
   return { keyed: written.method !== 'GET', sends: 'json', answers: 'json', ...written };
 }
 
-export type ParamsOf<O> = O extends Operation<infer P, infer _Q, infer _B, infer _A> ? z.output<P> : never;
-export type QueryOf<O> = O extends Operation<infer _P, infer Q, infer _B, infer _A> ? z.output<Q> : never;
-export type BodyOf<O> = O extends Operation<infer _P, infer _Q, infer B, infer _A> ? z.output<B> : never;
-export type AnswerOf<O> = O extends Operation<infer _P, infer _Q, infer _B, infer A> ? z.output<A> : never;
-export type BodyInputOf<O> = O extends Operation<infer _P, infer _Q, infer B, infer _A> ? z.input<B> : never;
-export type QueryInputOf<O> = O extends Operation<infer _P, infer Q, infer _B, infer _A> ? z.input<Q> : never;
+export type Shaped = { params?: Shape; query?: Shape; body?: Shape; answer: Shape };
+type Output<S> = S extends Shape ? z.output<S> : never;
+type Input<S> = S extends Shape ? z.input<S> : never;
+
+export type ParamsOf<O extends Shaped> = Output<NonNullable<O['params']>>;
+export type QueryOf<O extends Shaped> = Output<NonNullable<O['query']>>;
+export type BodyOf<O extends Shaped> = Output<NonNullable<O['body']>>;
+export type AnswerOf<O extends Shaped> = Output<O['answer']>;
+export type BodyInputOf<O extends Shaped> = Input<NonNullable<O['body']>>;
+export type QueryInputOf<O extends Shaped> = Input<NonNullable<O['query']>>;

@@ -5,10 +5,10 @@ import type { Transaction } from '@/db/client';
 import { companies, sites } from '@/db/schema/companies';
 import { databaseErrorNumber } from '@/db/transaction';
 import type { addPartner, addSite, changePartner, changeSite } from '@/shared/contracts/partners';
-import type { BodyOf } from '@/shared/contracts/operation';
+import type { BodyOf, Shaped } from '@/shared/contracts/operation';
 import { Problem } from '@/shared/problems/problems';
 
-type New<Operation> = { body: BodyOf<Operation>; now: string };
+type New<O extends Shaped> = { body: BodyOf<O>; now: string };
 
 /** A partner and its first site; both codes must be new. */
 export async function addPartnerWithSite(

@@ -1,6 +1,11 @@
 import { dayNumber } from '../calendar';
-import { type AssessmentCorrection, type AssessmentEvent, type AssessmentMovement } from './input';
-import { type MovementKind, movementKinds } from './input';
+import {
+  type AssessmentCorrection,
+  type AssessmentEvent,
+  type AssessmentMovement,
+  type MovementKind,
+  movementKinds,
+} from './input';
 import { CannotAssess } from './refusal';
 
 /** A movement at its corrected quantity (0 or more); `day` is a day number. */

@@ -15,7 +15,10 @@ async function anOperator() {
 }
 
 /** The last message to an address, as the administrator reads it in the product. */
-async function lastLetter(administrator: Caller, address: string): Promise<{ subject: string; text: string; state: string }> {
+async function lastLetter(
+  administrator: Caller,
+  address: string,
+): Promise<{ subject: string; text: string; state: string }> {
   const { body } = await administrator.get('/letters', { search: address });
   return body.rows[0];
 }
@@ -50,7 +53,12 @@ describe('an invitation', () => {
   it('cannot give a partner a role of the operator', async () => {
     const { administrator } = await anOperator();
     const partner = await product.aCompany();
-    const refused = await administrator.post('/people', { name: 'A', email: 'a1@x.example', company: partner.id, roles: ['finance'] });
+    const refused = await administrator.post('/people', {
+      name: 'A',
+      email: 'a1@x.example',
+      company: partner.id,
+      roles: ['finance'],
+    });
     expect(refused.status).toBe(400);
     expect(refused.body.fields[0].path).toBe('roles');
   });
@@ -59,12 +67,25 @@ describe('an invitation', () => {
     const partner = await product.aCompany();
     const other = await product.aCompany();
     const manager = await product.as(await product.aPerson(partner, ['manager']));
-    const own = await manager.post('/people', { name: 'New Clerk', email: 'new@own.example', roles: ['clerk'] });
+    const own = await manager.post('/people', {
+      name: 'New Clerk',
+      email: 'new@own.example',
+      roles: ['clerk'],
+    });
     expect(own.status).toBe(200);
-    const foreign = await manager.post('/people', { name: 'New', email: 'n@other.example', company: other.id, roles: ['clerk'] });
+    const foreign = await manager.post('/people', {
+      name: 'New',
+      email: 'n@other.example',
+      company: other.id,
+      roles: ['clerk'],
+    });
     expect([foreign.status, foreign.body.code]).toEqual([404, 'not found']);
     const { body } = await manager.get('/people');
-    expect(body.rows.map((row: { company: { id: string } }) => row.company.id).every((id: string) => id === partner.id)).toBe(true);
+    expect(
+      body.rows
+        .map((row: { company: { id: string } }) => row.company.id)
+        .every((id: string) => id === partner.id),
+    ).toBe(true);
   });
 
   it('answers a forgotten password alike for known and unknown addresses, and writes only to the known', async () => {
@@ -85,14 +106,22 @@ describe('a change of roles', () => {
     const mikkel = await product.aPerson(operator, ['finance'], { name: 'Mikkel Thorn' });
     const caller = await product.as(mikkel);
     product.setClock('2026-03-20T09:01:00.000Z');
-    const changed = await administrator.put(`/people/${mikkel.id}`, { name: 'Mikkel Thorn', roles: ['auditor'], active: true });
+    const changed = await administrator.put(`/people/${mikkel.id}`, {
+      name: 'Mikkel Thorn',
+      roles: ['auditor'],
+      active: true,
+    });
     expect(changed.status).toBe(200);
     expect((await caller.get('/session')).body.signedIn).toBeNull();
   });
 
   it('cannot take the administrator role from oneself', async () => {
     const { administrator, jonas } = await anOperator();
-    const refused = await administrator.put(`/people/${jonas.id}`, { name: 'Jonas', roles: ['auditor'], active: true });
+    const refused = await administrator.put(`/people/${jonas.id}`, {
+      name: 'Jonas',
+      roles: ['auditor'],
+      active: true,
+    });
     expect(refused.status).toBe(400);
   });
 });
