@@ -29,6 +29,9 @@ export function listWorkbook<Row>(list: List<Row>): Readable {
 }
 
 async function write<Row>({ name, columns, pages }: List<Row>, stream: PassThrough): Promise<void> {
+  // The first page comes before the first byte: a list that is refused is no file.
+  const reading = pages[Symbol.asyncIterator]();
+  let page = await reading.next();
   const workbook = new ExcelJS.stream.xlsx.WorkbookWriter({
     stream,
     useSharedStrings: false,
@@ -42,8 +45,8 @@ async function write<Row>({ name, columns, pages }: List<Row>, stream: PassThrou
   }));
   sheet.getRow(1).font = { bold: true };
   sheet.getRow(1).commit();
-  for await (const page of pages)
-    for (const row of page) sheet.addRow(columns.map((column) => valueOf(column, row))).commit();
+  for (; !page.done; page = await reading.next())
+    for (const row of page.value) sheet.addRow(columns.map((column) => valueOf(column, row))).commit();
   sheet.commit();
   await workbook.commit();
 }

@@ -28,7 +28,7 @@ const drawn = <T>(arbitrary: fc.Arbitrary<T>, numRuns: number): T[] =>
 
 /** Nothing, or what an answer shows that it must not: a failure of ours, a stack, a statement. */
 function harmOf({ status, text }: Response): string | undefined {
-  if (status >= 500) return `answered ${status}`;
+  if (status >= 500) return `answered ${status}: ${text}`;
   return /\\n {4}at |node_modules|\bselect `|\bER_[A-Z]|\\nparams:/.exec(text ?? '')?.[0];
 }
 
@@ -73,7 +73,7 @@ describe('requests of ill will', () => {
     const harms: unknown[] = [];
     const attack = async (caller: Caller, route: Guarded, given: Given) => {
       const answer = await callRoute(caller, route, given).catch(
-        () => ({ status: 599, text: '' }) as Response,
+        (error: unknown) => ({ status: 599, text: String(error) }) as Response,
       );
       const harm = harmOf(answer);
       if (harm) harms.push({ name: route.operation.name, harm, ...given });
