@@ -121,8 +121,8 @@ export async function playDisputes(book: Book, today: string): Promise<void> {
     from: 'SUNDHOLM',
     to: 'OSTREL',
     typeCode: 'RACK-CP',
-    declared: 24,
-    counted: 20,
+    declared: 12,
+    counted: 8,
     leftOn: back(12),
   });
   const parted = await open(
@@ -132,9 +132,9 @@ export async function playDisputes(book: Book, today: string): Promise<void> {
       subject: 'count',
       shipmentId: sundholm,
       typeCode: 'RACK-CP',
-      claimed: 24,
+      claimed: 12,
       reason: 'counted wrongly',
-      text: 'All 24 were on the two trucks.',
+      text: 'All twelve were on the two trucks.',
     },
   );
   await answer(book, {

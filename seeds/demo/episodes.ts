@@ -35,9 +35,9 @@ export async function playEpisodes(book: Book, today: string): Promise<void> {
   const swapped = await send(back(3), back(2), {
     fromSite: 'SUNDHOLM',
     toSite: 'OSTREL',
-    lines: [{ typeCode: 'RACK-CP', declared: 12 }],
+    lines: [{ typeCode: 'RACK-CP', declared: 6 }],
   });
-  await count(swapped, back(2), [asCounted('RACK-CP', 8), asCounted('BOX-1210', 4)]);
+  await count(swapped, back(2), [asCounted('RACK-CP', 4), asCounted('BOX-1210', 2)]);
 
   await splitDelivery(book, { today, send, count });
 
@@ -65,7 +65,7 @@ export async function playEpisodes(book: Book, today: string): Promise<void> {
   await send(today, addDays(today, 1), {
     fromSite: 'OSTREL',
     toSite: 'KESTREL',
-    lines: [{ typeCode: 'BOX-1210', declared: 6 }],
+    lines: [{ typeCode: 'BOX-1210', declared: 2 }],
   });
 }
 
