@@ -1,34 +1,32 @@
-import { and, asc, desc, eq, inArray, lt, gt, or, sql } from 'drizzle-orm';
+import { and, eq, gt, inArray, lt, sql } from 'drizzle-orm';
 import type { Reader } from '@/db/client';
 import { companies } from '@/db/schema/companies';
 import { containerTypes } from '@/db/schema/containers';
 import { differences, disputes, settlements } from '@/db/schema/differences';
 import { shipments } from '@/db/schema/shipments';
 import { formatMinor } from '@/shared/domain/money';
-import { fromCompany, fromSite, endsOf, laneColumns, toCompany, toSite } from './lane-ends';
-import { afterKey, beforeKey, holdsText } from './list-key';
+import { holdsText } from '../../http/search';
+import { keyset } from '../../http/sort';
+import { endsOf, fromCompany, fromSite, laneColumns, onLaneOf, toCompany, toSite } from './lane-ends';
 import type { Asked, Found } from './list-differences';
 
 /** Differences between declaration and count, open or settled. */
 export async function countedRows(db: Reader, asked: Asked): Promise<Found[]> {
   const { query, after, limit } = asked;
-  const columns = { since: differences.openedOn, id: differences.id };
   const down = query.state === 'settled';
+  const page = keyset({ by: differences.openedOn, then: differences.id, down, after });
   const rows = await selectDifferences(db)
     .where(
       and(
         eq(differences.state, query.state),
         kindCondition(query.kind),
-        query.partner ? or(eq(fromCompany.id, query.partner), eq(toCompany.id, query.partner)) : undefined,
+        onLaneOf(query.partner),
         query.type ? eq(differences.typeCode, query.type) : undefined,
-        holdsText(shipments.reference, query.search),
-        down ? beforeKey(columns, after) : afterKey(columns, after),
+        holdsText(query.search, shipments.reference),
+        page.after,
       ),
     )
-    .orderBy(
-      down ? desc(differences.openedOn) : asc(differences.openedOn),
-      down ? desc(differences.id) : asc(differences.id),
-    )
+    .orderBy(...page.order)
     .limit(limit);
   return foundOf(db, rows);
 }

@@ -2,14 +2,13 @@ import type { Reader } from '@/db/client';
 import type { DifferenceRow, listDifferences as contract } from '@/shared/contracts/differences';
 import type { AnswerOf, QueryOf } from '@/shared/contracts/operation';
 import { daysBetween } from '@/shared/domain/calendar';
-import { Problem } from '@/shared/problems/problems';
-import { asKey, type Key } from './list-key';
-import { overdueRows } from './overdue-rows';
+import { cursor, cutPage } from '../../http/page';
 import { countedRows } from './counted-rows';
+import { overdueRows } from './overdue-rows';
 import { unannouncedRows } from './unannounced-rows';
 
 type Query = QueryOf<typeof contract>;
-export type Asked = { query: Query; after: Key | null; limit: number; today: string };
+export type Asked = { query: Query; after: ReturnType<typeof cursor>; limit: number; today: string };
 /** A row before the days since it began are known. */
 export type Found = Omit<DifferenceRow, 'days'>;
 type Source = (db: Reader, asked: Asked) => Promise<Found[]>;
@@ -19,19 +18,12 @@ export async function listDifferences(
   db: Reader,
   { query, today }: { query: Query; today: string },
 ): Promise<AnswerOf<typeof contract>> {
-  const after = query.after === undefined ? null : asKey(query.after);
-  if (after === undefined)
-    throw new Problem('not valid', { fields: [{ path: 'after', message: 'Not a key of this list' }] });
-  const asked = { query, after, limit: query.limit + 1, today };
+  const asked = { query, after: cursor(query.after, 2), limit: query.limit + 1, today };
   const found = await Promise.all(sourcesOf(query).map((source) => source(db, asked)));
   const down = query.state === 'settled';
   const merged = found.flat().sort((a, b) => (down ? -1 : 1) * byKey(a, b));
-  const page = merged.slice(0, query.limit);
-  const last = page.at(-1);
-  return {
-    rows: page.map((row) => ({ ...row, days: Math.max(0, daysBetween(row.since, today)) })),
-    next: last && merged.length > query.limit ? `${last.since}_${last.id}` : null,
-  };
+  const { rows, next } = cutPage(merged, query.limit, ({ since, id }) => [since, id]);
+  return { rows: rows.map((row) => ({ ...row, days: Math.max(0, daysBetween(row.since, today)) })), next };
 }
 
 function sourcesOf({ kind, state }: Query): Source[] {

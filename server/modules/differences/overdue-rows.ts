@@ -1,7 +1,9 @@
-import { and, asc, eq, exists, inArray, sql } from 'drizzle-orm';
+import { and, eq, exists, inArray, sql } from 'drizzle-orm';
 import type { Reader } from '@/db/client';
 import { containerTypes } from '@/db/schema/containers';
 import { shipmentLines, shipments } from '@/db/schema/shipments';
+import { holdsText } from '../../http/search';
+import { keyset } from '../../http/sort';
 import {
   endsOf,
   fromCompany,
@@ -12,12 +14,12 @@ import {
   toCompany,
   toSite,
 } from './lane-ends';
-import { afterKey, holdsText } from './list-key';
 import type { Asked, Found } from './list-differences';
 import { worthOfLines } from './worth-of-lines';
 
 /** Shipments that nobody has counted although more than the partner's days have passed since they left (RULES 5). */
 export async function overdueRows(db: Reader, { query, after, limit, today }: Asked): Promise<Found[]> {
+  const page = keyset({ by: shipments.leftOn, then: shipments.id, down: false, after });
   const rows = await db
     .select({ shipment: shipments, ...laneColumns })
     .from(shipments)
@@ -31,11 +33,11 @@ export async function overdueRows(db: Reader, { query, after, limit, today }: As
         sql`datediff(${today}, ${shipments.leftOn}) > if(${toCompany.kind} = 'partner', ${toCompany.overdueAfterDays}, ${fromCompany.overdueAfterDays})`,
         onLaneOf(query.partner),
         query.type ? exists(linesOfType(db, query.type)) : undefined,
-        holdsText(shipments.reference, query.search),
-        afterKey({ since: shipments.leftOn, id: shipments.id }, after),
+        holdsText(query.search, shipments.reference),
+        page.after,
       ),
     )
-    .orderBy(asc(shipments.leftOn), asc(shipments.id))
+    .orderBy(...page.order)
     .limit(limit);
   const lines = await declaredOf(
     db,

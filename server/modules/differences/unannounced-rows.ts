@@ -1,7 +1,9 @@
-import { and, asc, eq, exists, inArray, sql } from 'drizzle-orm';
+import { and, eq, exists, inArray, sql } from 'drizzle-orm';
 import type { Reader } from '@/db/client';
 import { containerTypes } from '@/db/schema/containers';
 import { receiptLines, receipts } from '@/db/schema/work';
+import { holdsText } from '../../http/search';
+import { keyset } from '../../http/sort';
 import {
   endsOf,
   fromCompany,
@@ -12,12 +14,12 @@ import {
   toCompany,
   toSite,
 } from './lane-ends';
-import { afterKey, holdsText } from './list-key';
 import type { Asked, Found } from './list-differences';
 import { worthOfLines } from './worth-of-lines';
 
 /** Receipts from files that belong to no shipment of the book. */
 export async function unannouncedRows(db: Reader, { query, after, limit }: Asked): Promise<Found[]> {
+  const page = keyset({ by: receipts.countedOn, then: receipts.id, down: false, after });
   const rows = await db
     .select({ receipt: receipts, ...laneColumns })
     .from(receipts)
@@ -30,11 +32,11 @@ export async function unannouncedRows(db: Reader, { query, after, limit }: Asked
         eq(receipts.state, 'unannounced'),
         onLaneOf(query.partner),
         query.type ? exists(linesOfType(db, query.type)) : undefined,
-        holdsText(receipts.reference, query.search),
-        afterKey({ since: receipts.countedOn, id: receipts.id }, after),
+        holdsText(query.search, receipts.reference),
+        page.after,
       ),
     )
-    .orderBy(asc(receipts.countedOn), asc(receipts.id))
+    .orderBy(...page.order)
     .limit(limit);
   const lines = await countedOf(
     db,

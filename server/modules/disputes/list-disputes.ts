@@ -1,12 +1,14 @@
-import { and, asc, desc, eq, gt, inArray, isNotNull, isNull, lt, or, type SQL, sql } from 'drizzle-orm';
+import { and, eq, inArray, isNotNull, isNull, type SQL } from 'drizzle-orm';
 import type { Reader } from '@/db/client';
 import { disputes } from '@/db/schema/differences';
 import { shipments } from '@/db/schema/shipments';
 import { statements } from '@/db/schema/statements';
 import type { listDisputes as contract } from '@/shared/contracts/disputes';
 import type { AnswerOf, QueryOf } from '@/shared/contracts/operation';
-import { Problem } from '@/shared/problems/problems';
+import { cursor, cutPage } from '../../http/page';
 import { scopeOf } from '../../http/person';
+import { holdsText } from '../../http/search';
+import { keyset } from '../../http/sort';
 import { disputeRow, type Seen, selectDisputes } from './dispute-rows';
 
 type Query = QueryOf<typeof contract>;
@@ -16,20 +18,15 @@ export async function listDisputes(
   db: Reader,
   { query, seen }: { query: Query; seen: Seen },
 ): Promise<AnswerOf<typeof contract>> {
+  const { lastWordAt, id } = disputes;
   const down = query.state === 'decided';
+  const page = keyset({ by: lastWordAt, then: id, down, after: cursor(query.after, 2) });
   const selected = await selectDisputes(db)
-    .where(and(...conditionsOf(query, seen), afterKey(query.after, { down })))
-    .orderBy(
-      down ? desc(disputes.lastWordAt) : asc(disputes.lastWordAt),
-      down ? desc(disputes.id) : asc(disputes.id),
-    )
+    .where(and(...conditionsOf(query, seen), page.after))
+    .orderBy(...page.order)
     .limit(query.limit + 1);
-  const page = selected.slice(0, query.limit);
-  const last = page.at(-1)?.dispute;
-  return {
-    rows: page.map((row) => disputeRow(row, seen)),
-    next: last && selected.length > query.limit ? `${last.lastWordAt}_${last.id}` : null,
-  };
+  const { rows, next } = cutPage(selected, query.limit, ({ dispute }) => [dispute.lastWordAt, dispute.id]);
+  return { rows: rows.map((row) => disputeRow(row, seen)), next };
 }
 
 function conditionsOf(query: Query, { person }: Seen): (SQL | undefined)[] {
@@ -39,7 +36,7 @@ function conditionsOf(query: Query, { person }: Seen): (SQL | undefined)[] {
     stateCondition(query.state),
     query.subject ? eq(disputes.subject, query.subject) : undefined,
     query.partner ? eq(disputes.companyId, query.partner) : undefined,
-    searchCondition(query.search),
+    holdsText(query.search, shipments.reference, statements.number),
   ];
 }
 
@@ -48,22 +45,4 @@ function stateCondition(state: Query['state']): SQL | undefined {
     return and(inArray(disputes.state, ['open', 'waiting for partner']), isNotNull(disputes.openKey));
   if (state === 'decided') return isNull(disputes.openKey);
   return eq(disputes.state, state);
-}
-
-function searchCondition(search: string | undefined): SQL | undefined {
-  if (!search) return undefined;
-  const pattern = `%${search.replace(/[\\%_]/g, '\\$&')}%`;
-  return or(
-    sql`${shipments.reference} collate utf8mb4_general_ci like ${pattern}`,
-    sql`${statements.number} collate utf8mb4_general_ci like ${pattern}`,
-  );
-}
-
-function afterKey(after: string | undefined, { down }: { down: boolean }): SQL | undefined {
-  if (after === undefined) return undefined;
-  const [at = '', id = ''] = after.split('_');
-  if (!/^\d{4}-\d{2}-\d{2}T[\d:.]+Z$/.test(at) || !/^[0-9a-f-]{36}$/.test(id))
-    throw new Problem('not valid', { fields: [{ path: 'after', message: 'Not a key of this list' }] });
-  const beyond = down ? lt : gt;
-  return or(beyond(disputes.lastWordAt, at), and(eq(disputes.lastWordAt, at), beyond(disputes.id, id)));
 }

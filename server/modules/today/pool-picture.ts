@@ -8,17 +8,17 @@ import { shipments } from '@/db/schema/shipments';
 import type { PoolOfType, Today } from '@/shared/contracts/today';
 import { formatMinor } from '@/shared/domain/money';
 import { may, type Person } from '../../http/person';
-import { latestApprovals } from './levels';
+import { latestApprovals } from '../pool/latest-approvals';
 
 /** Where the pool is, type by type: the circuit of the operator. */
 export async function poolPicture(db: Reader, person: Person): Promise<Today['pool']> {
   if (person.companyKind !== 'operator' || !may(person, 'see pool')) return null;
   const types = await db.select().from(containerTypes).orderBy(containerTypes.name, containerTypes.code);
-  const approvals = await latestApprovals(db);
+  const approved = new Map((await latestApprovals(db)).map(({ typeCode, size }) => [typeCode, size]));
   const pools = new Map<string, PoolOfType>(
     types.map(({ code, name }) => [
       code,
-      { ...empty, typeCode: code, typeName: name, atStake: [], approved: approvals.get(code)?.size ?? null },
+      { ...empty, typeCode: code, typeName: name, atStake: [], approved: approved.get(code) ?? null },
     ]),
   );
   for (const { typeCode, kind, units } of await standing(db)) {
