@@ -18,7 +18,7 @@ const columns: readonly Column<LogRow>[] = [
   {
     key: 'action',
     head: words.columns.action,
-    cell: (row) => <CellText strong>{row.action}</CellText>,
+    cell: (row) => <CellText strong>{words.action(row.action)}</CellText>,
     cardRole: 'title',
   },
   { key: 'at', head: words.columns.at, cell: (row) => <CellText>{formatInstant(row.at, 'UTC')}</CellText> },
@@ -52,16 +52,17 @@ const filters = [
   {
     key: 'outcome',
     label: words.outcomeFilter,
+    usual: words.outcomes.all,
     options: [
-      { value: '', label: words.outcomes.all },
       { value: 'done', label: words.outcomes.done },
       { value: 'refused', label: words.outcomes.refused },
     ],
   },
+  { key: 'subject', label: words.subjectFilter, options: [{ value: 'book', label: words.subjects.book }] },
 ];
 
 export function LogScreen() {
-  const state = useListState({ filters: ['outcome'] });
+  const state = useListState({ filters: ['outcome', 'subject'] });
   const list = useReadPages(listLog, { query: state.query });
   return (
     <Page title={words.title} lead={words.lead}>

@@ -4,6 +4,7 @@ import { formatInstant } from '@/shared/text/format';
 import { Problem } from '../data/Problem';
 import { useRead } from '../data/use-operation';
 import { Card } from '../ui/Card';
+import { Link } from '../ui/Link';
 import { Notice } from '../ui/Notice';
 import { Page } from '../ui/Page';
 import { Skeleton } from '../ui/Skeleton';
@@ -40,9 +41,16 @@ export function LetterScreen({ letter }: { letter: string }) {
       ) : null}
       <Card>
         {paragraphs.map((paragraph, index) => (
-          <Text key={index}>{paragraph}</Text>
+          <Paragraph key={index} words={paragraph} />
         ))}
       </Card>
     </Page>
   );
+}
+
+/** A line that is an address leads to that page of this app, whatever host the reader's own letter names. */
+function Paragraph({ words: said }: { words: string }) {
+  if (!/^https?:\/\/\S+$/.test(said) || !URL.canParse(said)) return <Text>{said}</Text>;
+  const { pathname, search } = new URL(said);
+  return <Link href={`${pathname}${search}`} label={said} />;
 }

@@ -37,10 +37,8 @@ const filters = [
   {
     key: 'state',
     label: words.stateFilter,
-    options: [
-      { value: '', label: words.anyState },
-      ...Object.entries(words.states).map(([value, label]) => ({ value, label })),
-    ],
+    usual: words.anyState,
+    options: Object.entries(words.states).map(([value, label]) => ({ value, label })),
   },
 ];
 

@@ -15,7 +15,7 @@ export const screensByPerson = {
   'ane@fennmark.example': async (camera) => {
     const { id } = await firstOf(camera, '/shipments?state=differs');
     const toCount = await firstOf(camera, '/shipments?state=on%20the%20way&direction=in');
-    const difference = await firstOf(camera, '/differences');
+    const difference = await firstOf(camera, '/differences?kind=fewer');
     const dispute = await firstOf(camera, '/disputes');
     const balance = await firstOf(camera, '/balances');
     return [
@@ -43,7 +43,7 @@ export const screensByPerson = {
       '/shipments',
       '/shipments/send',
       `/shipments/${toCount.id}/count`,
-      `/disputes/new?shipment=${counted.id}`,
+      `/shipments/${counted.id}/dispute`,
       '/balances',
       '/disputes',
       '/container-types/TOTE-64',

@@ -1,4 +1,4 @@
-import { and, desc, eq, like, lt, or } from 'drizzle-orm';
+import { and, desc, eq, like, lt, or, sql } from 'drizzle-orm';
 import type { Database } from '@/db/client';
 import { log } from '@/db/schema/access';
 import { companies, people } from '@/db/schema/companies';
@@ -7,7 +7,7 @@ import type { listLetters, listLog } from '@/shared/contracts/log';
 import type { QueryOf } from '@/shared/contracts/operation';
 import { Problem } from '@/shared/problems/problems';
 import { cursor, cursorNumber, cutPage } from '../../http/page';
-import { likeText } from '../../http/search';
+import { holdsText, likeText } from '../../http/search';
 
 /** The log, newest first. */
 export async function logPage(db: Database, query: QueryOf<typeof listLog>) {
@@ -23,9 +23,7 @@ export async function logPage(db: Database, query: QueryOf<typeof listLog>) {
         query.person ? eq(log.personId, query.person) : undefined,
         query.subject ? eq(log.subjectId, query.subject) : undefined,
         query.outcome ? eq(log.outcome, query.outcome) : undefined,
-        query.search
-          ? or(like(log.action, likeText(query.search)), eq(log.requestId, query.search))
-          : undefined,
+        query.search ? or(actionIsLike(query.search), eq(log.requestId, query.search)) : undefined,
       ),
     )
     .orderBy(desc(log.id))
@@ -33,6 +31,10 @@ export async function logPage(db: Database, query: QueryOf<typeof listLog>) {
   const flat = rows.map(({ row, person, company }) => ({ ...row, person, company }));
   return cutPage(flat, query.limit, (row) => [String(row.id)]);
 }
+
+/** "settle difference", as the screen says it, finds "settleDifference". */
+const actionIsLike = (typed: string) =>
+  like(sql`replace(${log.action}, ' ', '')`, likeText(typed.replace(/\s+/g, '')));
 
 /** Mail of the outbox, newest first. Ids grow with time. */
 export async function lettersPage(db: Database, query: QueryOf<typeof listLetters>) {
@@ -44,9 +46,7 @@ export async function lettersPage(db: Database, query: QueryOf<typeof listLetter
       and(
         after ? lt(outbox.id, after[0]) : undefined,
         query.state ? eq(outbox.state, query.state) : undefined,
-        query.search
-          ? or(like(outbox.toAddress, likeText(query.search)), like(outbox.subject, likeText(query.search)))
-          : undefined,
+        holdsText(query.search, outbox.toAddress, outbox.subject),
       ),
     )
     .orderBy(desc(outbox.id))

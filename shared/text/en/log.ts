@@ -18,8 +18,12 @@ export const log = {
     request: 'Request',
   },
   nobody: 'nobody signed in',
+  /** "settleDifference" as a person reads it: "settle difference". */
+  action: (name: string) => name.replace(/([a-z])([A-Z])/g, '$1 $2').toLowerCase(),
   outcomes: { all: 'Any outcome', done: 'done', refused: 'refused' },
   outcomeFilter: 'Outcome',
+  subjectFilter: 'On what',
+  subjects: { book: 'Checks of the book' },
   seals: {
     title: 'The seals of the ledger',
     check: 'Check the seals',

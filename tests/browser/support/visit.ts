@@ -35,7 +35,10 @@ export class Visit {
   }
 
   field(label: Name): Locator {
-    return this.page.getByLabel(label, { exact: typeof label === 'string' }).first();
+    return this.page
+      .getByLabel(label, { exact: typeof label === 'string' })
+      .and(this.page.locator('input, textarea, select'))
+      .first();
   }
 
   async write(label: Name, value: string): Promise<void> {
