@@ -20,6 +20,7 @@ const node = {
     ],
   },
   transformIgnorePatterns: [`/node_modules/(?!(${esModules})/)`],
+  setupFilesAfterEnv: ['<rootDir>/tests/support/patience.ts'],
 };
 
 module.exports = {
@@ -30,7 +31,6 @@ module.exports = {
       ...node,
       displayName: 'server',
       testMatch: ['<rootDir>/tests/server/**/*.test.ts'],
-      setupFilesAfterEnv: ['<rootDir>/tests/support/server-setup.ts'],
     },
     { ...node, displayName: 'browser', testMatch: ['<rootDir>/tests/browser/**/*.test.ts'] },
     {
@@ -38,7 +38,10 @@ module.exports = {
       rootDir: __dirname,
       preset: 'jest-expo/web',
       testMatch: ['<rootDir>/tests/components/**/*.test.tsx'],
-      setupFilesAfterEnv: ['<rootDir>/tests/support/components-setup.ts'],
+      setupFilesAfterEnv: [
+        '<rootDir>/tests/support/patience.ts',
+        '<rootDir>/tests/support/components-setup.ts',
+      ],
       moduleNameMapper: {
         ...web.moduleNameMapper,
         '^@/(.*)$': '<rootDir>/$1',

@@ -1,1 +1,0 @@
-jest.setTimeout(60_000);
