@@ -1,6 +1,7 @@
 import { type DisputeRow, listDisputes, subjects } from '@/shared/contracts/disputes';
+import { listPartners } from '@/shared/contracts/partners';
 import { text } from '@/shared/text/catalogue';
-import { useReadPages } from '../data/use-operation';
+import { useRead, useReadPages } from '../data/use-operation';
 import { useSignedIn } from '../data/use-session';
 import { ListAndDetail, useSideBySide } from '../tables/ListAndDetail';
 import { RecordList } from '../tables/RecordList';
@@ -37,7 +38,7 @@ const stateWords = {
   decided: words.filter.decided,
 };
 
-const filters = [
+const usualFilters = [
   {
     key: 'state',
     label: words.filter.state,
@@ -54,10 +55,20 @@ const filters = [
   },
 ];
 
+/** The operator can narrow the list to one partner. */
+function useFilters(isOperator: boolean) {
+  const query = { kind: 'partner', limit: 200 } as const;
+  const partners = useRead(listPartners, { query, enabled: isOperator }).data?.rows ?? [];
+  if (!isOperator) return usualFilters;
+  const options = partners.map(({ id, name }) => ({ value: id, label: name }));
+  return [...usualFilters, { key: 'partner', label: words.filter.partner, options }];
+}
+
 function DisputesList({ chosen }: { chosen?: string }) {
-  const state = useListState({ filters: ['state', 'subject'] });
+  const state = useListState({ filters: ['state', 'subject', 'partner'] });
   const list = useReadPages(listDisputes, { query: state.query });
   const isOperator = useSignedIn().company.kind === 'operator';
+  const filters = useFilters(isOperator);
   const asked = new URLSearchParams(state.query).toString();
   const empty = isOperator
     ? { title: words.emptyOperator, hint: words.emptyOperatorBody }

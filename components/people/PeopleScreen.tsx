@@ -1,7 +1,8 @@
 import { listPeople, type PersonRow } from '@/shared/contracts/people';
+import { listPartners } from '@/shared/contracts/partners';
 import { text } from '@/shared/text/catalogue';
 import { formatInstant } from '@/shared/text/format';
-import { useReadPages } from '../data/use-operation';
+import { useRead, useReadPages } from '../data/use-operation';
 import { useSignedIn } from '../data/use-session';
 import type { Column } from '../tables/column';
 import { RecordList } from '../tables/RecordList';
@@ -43,20 +44,32 @@ const columnsFor = (zone: string): readonly Column<PersonRow>[] => [
   },
 ];
 
-const filters = [
-  {
-    key: 'state',
-    label: words.stateFilter,
-    options: [
-      { value: '', label: words.anyState },
-      ...Object.entries(words.states).map(([value, label]) => ({ value, label })),
-    ],
-  },
-];
+const stateFilter = {
+  key: 'state',
+  label: words.stateFilter,
+  usual: words.anyState,
+  options: Object.entries(words.states).map(([value, label]) => ({ value, label })),
+};
+
+/** The operator can narrow the list to one company; a partner sees its own people only. */
+function useFilters() {
+  const isOperator = useSignedIn().company.kind === 'operator';
+  const companies = useRead(listPartners, { query: { limit: 200 }, enabled: isOperator }).data?.rows ?? [];
+  if (!isOperator) return [stateFilter];
+  return [
+    stateFilter,
+    {
+      key: 'company',
+      label: words.companyFilter,
+      options: companies.map(({ id, name }) => ({ value: id, label: name })),
+    },
+  ];
+}
 
 export function PeopleScreen() {
   const state = useListState({ filters: ['state', 'company'] });
   const list = useReadPages(listPeople, { query: state.query });
+  const filters = useFilters();
   const { company, may } = useSignedIn();
   const invite = may('invite people') ? <ButtonLink href="/people/invite" label={words.invite} /> : undefined;
   return (

@@ -24,6 +24,7 @@ export const people = {
   never: 'never',
   stateFilter: 'State',
   anyState: 'Any state',
+  companyFilter: 'Company',
   fields: {
     name: 'Name',
     email: 'Mail',
