@@ -15,7 +15,7 @@ const figure = (units: number | null) => <Figure units={units} plain />;
 const columns: readonly SheetColumn<Line>[] = [
   { key: 'type', head: words.type, cell: (line) => line.typeName },
   { key: 'declared', head: words.declared, align: 'end', cell: (line) => figure(line.declared) },
-  { key: 'counted', head: words.counted, align: 'end', cell: (line) => figure(line.counted) },
+  { key: 'counted', head: words.counted, align: 'end', cell: (line) => <Counted line={line} /> },
   { key: 'damaged', head: words.damaged, align: 'end', cell: (line) => figure(line.damaged) },
   { key: 'dirty', head: words.dirty, align: 'end', cell: (line) => figure(line.dirty) },
   { key: 'difference', head: words.difference, cell: (line) => <Difference line={line} /> },
@@ -26,7 +26,7 @@ export function LinesCard({ shipment }: { shipment: ShipmentDetail }) {
   const isCounted = shipment.state === 'counted';
   const sum = (part: 'declared' | 'damaged' | 'dirty') =>
     shipment.lines.reduce((units, line) => units + line[part], 0);
-  const counted = shipment.lines.reduce((units, line) => units + (line.counted ?? 0), 0);
+  const counted = shipment.lines.reduce((units, line) => units + (line.countedNow ?? 0), 0);
   return (
     <Card title={words.linesHead}>
       <Sheet
@@ -48,10 +48,21 @@ export function LinesCard({ shipment }: { shipment: ShipmentDetail }) {
   );
 }
 
+/** The count as it stands; the first one beside it where it was put right. */
+function Counted({ line }: { line: Line }) {
+  if (line.countedNow === line.counted || line.counted === null) return figure(line.counted);
+  return (
+    <>
+      {figure(line.countedNow)}
+      <Text variant="small">{words.firstCounted(line.counted)}</Text>
+    </>
+  );
+}
+
 function Difference({ line }: { line: Line }) {
   if (line.counted === null) return <Text variant="soft">{words.notCounted}</Text>;
   if (line.openUnits !== 0) return <Tag {...differenceOf(line.openUnits)} />;
-  const by = line.counted - line.declared;
+  const by = (line.countedNow ?? line.counted) - line.declared;
   return by === 0 ? (
     <Tag tone="done" label={words.asDeclared} />
   ) : (

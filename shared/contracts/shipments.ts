@@ -26,6 +26,8 @@ export const shipmentLine = z.object({
   unitsPerStack: z.number().int(),
   declared: z.number().int(),
   counted: z.number().int().nullable(),
+  /** The count as it stands by the book, where it was put right since; else as `counted`. */
+  countedNow: z.number().int().nullable(),
   damaged: z.number().int(),
   dirty: z.number().int(),
   /** What is neither where it was declared nor settled; below 0 fewer came, above 0 more. */

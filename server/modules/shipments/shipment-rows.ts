@@ -1,9 +1,10 @@
-import { and, eq, inArray, sql } from 'drizzle-orm';
+import { and, eq, inArray, isNotNull, sql } from 'drizzle-orm';
 import { alias } from 'drizzle-orm/mysql-core';
 import type { Reader } from '@/db/client';
 import { companies, sites } from '@/db/schema/companies';
 import { containerTypes } from '@/db/schema/containers';
 import { differences } from '@/db/schema/differences';
+import { accounts, ledgerEntries, ledgerLines } from '@/db/schema/ledger';
 import { countLines, counts, shipmentLines, shipments } from '@/db/schema/shipments';
 import type { ShipmentRow } from '@/shared/contracts/shipments';
 import { may, type Person } from '../../http/person';
@@ -103,10 +104,11 @@ function directionOf({ shipment }: SelectedShipment, person: Person): ShipmentRo
 async function linesOf(db: Reader, ids: readonly string[]): Promise<Map<string, Line[]>> {
   const lines = new Map<string, Line[]>(ids.map((id) => [id, []]));
   if (ids.length === 0) return lines;
-  const [declared, counted, open] = await Promise.all([
+  const [declared, counted, open, putRight] = await Promise.all([
     declaredOf(db, ids),
     countedOf(db, ids),
     openOf(db, ids),
+    putRightBy(db, ids),
   ]);
   const keyed = new Map(counted.map((row) => [`${row.shipmentId} ${row.typeCode}`, row]));
   const openBy = new Map(open.map((row) => [`${row.shipmentId} ${row.typeCode}`, row.openUnits]));
@@ -115,12 +117,14 @@ async function linesOf(db: Reader, ids: readonly string[]): Promise<Map<string, 
     const key = `${head.shipmentId} ${head.typeCode}`;
     const found = keyed.get(key);
     keyed.delete(key);
+    const first = isCounted.has(head.shipmentId) ? Number(found?.counted ?? 0) : null;
     lines.get(head.shipmentId)?.push({
       typeCode: head.typeCode,
       typeName: head.typeName,
       unitsPerStack: head.unitsPerStack,
       declared: units,
-      counted: isCounted.has(head.shipmentId) ? Number(found?.counted ?? 0) : null,
+      counted: first,
+      countedNow: first === null ? null : first + (putRight.get(key) ?? 0),
       damaged: Number(found?.damaged ?? 0),
       dirty: Number(found?.dirty ?? 0),
       openUnits: openBy.get(key) ?? 0,
@@ -174,4 +178,33 @@ function openOf(db: Reader, ids: readonly string[]) {
     })
     .from(differences)
     .where(and(inArray(differences.shipmentId, [...ids]), eq(differences.state, 'open')));
+}
+
+/** By how many units the counts of each shipment and type were put right since: entries that correct a count's entry. */
+async function putRightBy(db: Reader, ids: readonly string[]): Promise<Map<string, number>> {
+  const rows = await db
+    .select({
+      shipmentId: ledgerEntries.shipmentId,
+      typeCode: ledgerLines.typeCode,
+      units: sql<string>`sum(case when ${ledgerLines.toAccountId} = ${accounts.id} then ${ledgerLines.units} else -${ledgerLines.units} end)`,
+    })
+    .from(ledgerEntries)
+    .innerJoin(shipments, eq(shipments.id, ledgerEntries.shipmentId))
+    .innerJoin(accounts, eq(accounts.siteId, shipments.toSiteId))
+    .innerJoin(
+      ledgerLines,
+      and(
+        eq(ledgerLines.entryId, ledgerEntries.id),
+        sql`${accounts.id} in (${ledgerLines.fromAccountId}, ${ledgerLines.toAccountId})`,
+      ),
+    )
+    .where(
+      and(
+        inArray(ledgerEntries.shipmentId, [...ids]),
+        isNotNull(ledgerEntries.countId),
+        isNotNull(ledgerEntries.correctsEntryId),
+      ),
+    )
+    .groupBy(ledgerEntries.shipmentId, ledgerLines.typeCode);
+  return new Map(rows.map((row) => [`${row.shipmentId} ${row.typeCode}`, Number(row.units)]));
 }

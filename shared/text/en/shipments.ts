@@ -51,6 +51,7 @@ export const shipments = {
   openDifference: 'Difference open',
   declared: 'Declared',
   counted: 'Counted',
+  firstCounted: (units: number) => `first counted ${formatUnits(units)}`,
   difference: 'Difference',
   damaged: 'Damaged',
   dirty: 'To clean',

@@ -20,6 +20,7 @@ const line = (typeCode: string, typeName: string, declared: number) => ({
   counted: null,
   damaged: 0,
   dirty: 0,
+  countedNow: null,
   openUnits: 0,
 });
 const shipment: ShipmentDetail = {
