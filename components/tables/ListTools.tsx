@@ -69,8 +69,11 @@ function Folded({ state, children }: { state: ListState; children: ReactNode }) 
 }
 
 const searchPause = 300;
+/** On a desk a search takes no more than this, in px. */
+const widestSearch = 420;
 
 function SearchInput({ label, state }: { label: string; state: ListState }) {
+  const wide = useIsWide();
   const [typed, setTyped] = useState(state.search);
   useEffect(() => {
     if (typed === state.search) return undefined;
@@ -82,7 +85,7 @@ function SearchInput({ label, state }: { label: string; state: ListState }) {
     if (state.search === '') setTyped('');
   }, [state.search]);
   return (
-    <Box grow least={200}>
+    <Box grow least={200} {...(wide ? { most: widestSearch } : {})}>
       <TextInput label={label} type="search" value={typed} onChange={setTyped} />
     </Box>
   );

@@ -14,6 +14,8 @@ type Props = {
   pad?: Space;
   /** Least width in px before things wrap. */
   least?: number;
+  /** Never wider than so many px. */
+  most?: number;
   /** Exactly so many px wide. */
   width?: number;
 };
@@ -33,7 +35,7 @@ const spreadOut = {
 } as const;
 
 /** Lays things out below or beside each other, with gaps from the scale. */
-export function Box({ children, gap = 'm', row, wrap, align, spread, grow, pad, least, width }: Props) {
+export function Box({ children, gap = 'm', row, wrap, align, spread, grow, pad, least, most, width }: Props) {
   const style: ViewStyle = {
     gap: space[gap],
     flexDirection: row ? 'row' : 'column',
@@ -43,6 +45,7 @@ export function Box({ children, gap = 'm', row, wrap, align, spread, grow, pad, 
     ...(grow ? { flexGrow: 1, flexShrink: 1, flexBasis: least ?? 0 } : {}),
     ...(pad ? { padding: space[pad] } : {}),
     ...(least && !grow ? { minWidth: least } : {}),
+    ...(most ? { maxWidth: most } : {}),
     ...(width ? { width, flexShrink: 0 } : {}),
   };
   return <View style={[styles.box, style]}>{children}</View>;

@@ -20,7 +20,7 @@ export const shell = {
     pool: 'Pool',
     imports: 'Imports',
     log: 'Log',
-    mail: 'Captured mail',
+    mail: 'Mail',
     account: 'Account',
     more: 'More',
     gallery: 'Gallery',
