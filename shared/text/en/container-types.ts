@@ -83,7 +83,8 @@ export const containerTypes = {
     full: 'A full one weighs more than 25 kg.',
     empty: 'Even an empty one weighs more than 25 kg.',
     source:
-      '25 kg is the reference mass of ISO 11228-1:2003, annex, under good conditions; the annex gives 20 or 15 kg for women. Quoted from memory, not checked against the text. Check the maker’s plate and local rules before anyone lifts it.',
+      // Common practice, no source: ISO 11228-1 treats it, its text was not at hand to check the figures against.
+      '25 kg for one person is common practice, often less: see ISO 11228-1 and what your country asks. Check the maker’s plate and local rules before anyone lifts it.',
   },
   onPallet: 'On a pallet',
   onPalletLead:
