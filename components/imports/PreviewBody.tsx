@@ -35,8 +35,12 @@ export function PreviewBody({ held, back }: Props) {
     setUnsaid(unsaid);
     if (!unsaid) confirm.mutate({ params: { import: held.id }, body: { leaveOut: held.rowsBad } });
   };
+  // Awaited, not `onSuccess`: what is read anew takes this preview away before that is called.
   const putAside = () =>
-    drop.mutate({ params: { import: held.id } }, { onSuccess: () => router.replace('/imports') });
+    drop.mutateAsync({ params: { import: held.id } }).then(
+      () => router.replace('/imports'),
+      () => undefined,
+    );
   const action =
     held.rowsGood > 0 ? (
       <Button label={words.confirm(held.rowsGood)} busy={confirm.isPending} onPress={post} />

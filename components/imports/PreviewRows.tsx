@@ -51,7 +51,7 @@ const columns: readonly Column<ImportFileRow>[] = [
     key: 'units',
     head: words.columns.units,
     align: 'end',
-    cell: ({ cells }) => <CellText>{cells.units}</CellText>,
+    cell: ({ cells }) => <CellText end>{cells.units}</CellText>,
   },
 ];
 
