@@ -6,9 +6,9 @@ import { text } from '@/shared/text/catalogue';
 import { newId } from '../data/new-id';
 
 const line = countForm.shape.lines.element.superRefine((value, context) => {
-  if (value.damaged > value.counted)
+  if (value.counted >= 0 && value.damaged > value.counted)
     context.addIssue({ code: 'custom', path: ['damaged'], message: text.shipments.moreDamaged });
-  if (value.dirty > value.counted)
+  if (value.counted >= 0 && value.dirty > value.counted)
     context.addIssue({ code: 'custom', path: ['dirty'], message: text.shipments.moreDirty });
 });
 

@@ -42,7 +42,6 @@ export function SettingsCard({ page }: { page: PartnerTermsPage }) {
           },
           { key: 'value', head: words.settingHeads.value, cell: (row) => <Text>{row.value}</Text> },
         ]}
-        stack
       />
       <Notice kind="caution" live={false}>
         {words.caution}
