@@ -7,7 +7,7 @@ import {
   type MovementRow,
 } from '@/shared/contracts/balances';
 import type { AnswerOf, ParamsOf, QueryOf } from '@/shared/contracts/operation';
-import { Problem } from '@/shared/problems/problems';
+import { cursor, cursorNumber, cutPage } from '../../http/page';
 import { may, type Person } from '../../http/person';
 import { accountNames, placeOf } from '../ledger/account-names';
 import { accountsOfPart } from './parts-sql';
@@ -35,22 +35,21 @@ type Found = {
 export async function movementRows(db: Reader, asked: Asked): Promise<AnswerOf<typeof contract>> {
   await visibleBalance(db, asked);
   const { limit } = asked.query;
-  const [found] = await db.execute(statement(asked, asked.query.after ? keyOf(asked.query.after) : null));
+  const [found] = await db.execute(statement(asked, keyOf(asked.query.after)));
   const lines = found as unknown as Found[];
-  const page = lines.slice(0, limit);
-  const last = page.at(-1);
-  const next = last ? [last.valueDate, last.entryId, last.lineNo, last.inward].join('_') : null;
-  return { rows: await named(db, page, asked.person), next: lines.length > limit ? next : null };
+  const { rows, next } = cutPage(lines, limit, ({ valueDate, entryId, lineNo, inward }) =>
+    [valueDate, entryId, lineNo, inward].map(String),
+  );
+  return { rows: await named(db, rows, asked.person), next };
 }
 
 type Key = { day: string; entry: number; line: number; inward: number };
 
-function keyOf(after: string): Key {
-  const [, day = '', entry, line, inward] =
-    /^(\d{4}-\d{2}-\d{2})_(\d{1,15})_(\d{1,6})_([01])$/.exec(after) ?? [];
-  if (!day)
-    throw new Problem('not valid', { fields: [{ path: 'after', message: 'Not a key of this list' }] });
-  return { day, entry: Number(entry), line: Number(line), inward: Number(inward) };
+function keyOf(after: string | undefined): Key | null {
+  const seen = cursor(after, 4);
+  if (seen === null) return null;
+  const [day, entry = '', line = '', inward = ''] = seen;
+  return { day, entry: cursorNumber(entry), line: cursorNumber(line), inward: cursorNumber(inward) };
 }
 
 /** Lines into the accounts and lines out of them, each read from its own index, put together in order. */

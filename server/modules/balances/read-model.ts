@@ -1,11 +1,14 @@
-import { and, asc, eq, gt, or, type SQL, sql } from 'drizzle-orm';
+import { and, eq, sql } from 'drizzle-orm';
 import type { Reader } from '@/db/client';
 import { companies, sites } from '@/db/schema/companies';
 import { containerTypes } from '@/db/schema/containers';
 import type { BalanceRow, listBalances, readBalance } from '@/shared/contracts/balances';
 import type { AnswerOf, ParamsOf, QueryOf } from '@/shared/contracts/operation';
 import { Problem } from '@/shared/problems/problems';
+import { cursor, cutPage } from '../../http/page';
 import { type Person, scopeOf } from '../../http/person';
+import { holdsText } from '../../http/search';
+import { keyset } from '../../http/sort';
 import { netsOf } from './parts-sql';
 import { type SiteUnits, unitsAsKnown } from './units-as-known';
 import { noUnits, type Parts, type PartsByCompany, unitsByCompany } from './units-by-company';
@@ -19,12 +22,12 @@ export async function balanceRows(
   { query, person, today }: Listing,
 ): Promise<AnswerOf<typeof listBalances>> {
   const found = await companiesOfPage(db, { query, person });
-  const page = found.slice(0, query.limit);
+  const { rows: page, next } = cutPage(found, query.limit, ({ name, id }) => [name, id]);
   const { asOf, type } = query;
   const units = await unitsByCompany(db, { companyIds: page.map((company) => company.id), asOf, type });
   return {
     rows: rowsOf({ companies: page, units, names: await typeNames(db) }),
-    next: found.length > query.limit ? (page.at(-1)?.id ?? null) : null,
+    next,
     asOf: asOf ?? null,
     today,
   };
@@ -35,7 +38,8 @@ async function companiesOfPage(
   { query, person }: Pick<Listing, 'query' | 'person'>,
 ): Promise<Company[]> {
   const scope = scopeOf(person);
-  const search = query.search?.replace(/[\\%_]/g, '\\$&');
+  const { name, id } = companies;
+  const page = keyset({ by: name, then: id, down: false, after: cursor(query.after, 2) });
   return db
     .select()
     .from(companies)
@@ -43,19 +47,12 @@ async function companiesOfPage(
       and(
         scope ? eq(companies.id, scope) : undefined,
         query.company ? eq(companies.id, query.company) : undefined,
-        search ? sql`${companies.name} like ${`%${search}%`}` : undefined,
-        query.after ? await afterCompany(db, query.after) : undefined,
+        holdsText(query.search, name),
+        page.after,
       ),
     )
-    .orderBy(asc(companies.name), asc(companies.id))
+    .orderBy(...page.order)
     .limit(query.limit + 1);
-}
-
-async function afterCompany(db: Reader, id: string): Promise<SQL | undefined> {
-  const [last] = await db.select({ name: companies.name }).from(companies).where(eq(companies.id, id));
-  if (!last)
-    throw new Problem('not valid', { fields: [{ path: 'after', message: 'Not a key of this list' }] });
-  return or(gt(companies.name, last.name), and(eq(companies.name, last.name), gt(companies.id, id)));
 }
 
 type Made = { companies: readonly Company[]; units: PartsByCompany; names: Map<string, string> };

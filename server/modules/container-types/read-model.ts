@@ -1,4 +1,4 @@
-import { and, asc, eq, like, or } from 'drizzle-orm';
+import { and, asc, eq } from 'drizzle-orm';
 import type { MySqlColumn } from 'drizzle-orm/mysql-core';
 import type { Reader } from '@/db/client';
 import { companies } from '@/db/schema/companies';
@@ -10,7 +10,7 @@ import { stackLoad } from '@/shared/domain/stack-load';
 import { unitsPerLayer } from '@/shared/domain/unit-load';
 import { Problem } from '@/shared/problems/problems';
 import { cursor, cutPage } from '../../http/page';
-import { likeText } from '../../http/search';
+import { holdsText } from '../../http/search';
 import { keyset, sortOf } from '../../http/sort';
 import { hasBeenMoved } from './moved';
 
@@ -28,7 +28,7 @@ export async function typesPage(db: Reader, query: QueryOf<typeof listContainerT
       and(
         query.kind ? eq(containerTypes.kind, query.kind) : undefined,
         query.use ? eq(containerTypes.active, query.use === 'in use') : undefined,
-        query.search ? or(like(name, likeText(query.search)), like(code, likeText(query.search))) : undefined,
+        holdsText(query.search, name, code),
         page.after,
       ),
     )

@@ -1,30 +1,27 @@
-import { and, asc, count, eq, gt, like, or } from 'drizzle-orm';
+import { and, asc, count, eq } from 'drizzle-orm';
 import type { Database } from '@/db/client';
 import { companies, people, sites } from '@/db/schema/companies';
 import type { listPartners } from '@/shared/contracts/partners';
 import type { QueryOf } from '@/shared/contracts/operation';
 import { Problem } from '@/shared/problems/problems';
-import { likeText } from '../../http/search';
+import { holdsText } from '../../http/search';
+import { keyset } from '../../http/sort';
 import { cursor, cutPage } from '../../http/page';
 
 /** Companies by name, a page by key. */
 export async function partnersPage(db: Database, query: QueryOf<typeof listPartners>) {
-  const after = cursor(query.after, 2);
+  const page = keyset({ by: companies.name, then: companies.id, down: false, after: cursor(query.after, 2) });
   const rows = await db
     .select()
     .from(companies)
     .where(
       and(
         query.kind ? eq(companies.kind, query.kind) : undefined,
-        query.search
-          ? or(like(companies.name, likeText(query.search)), like(companies.code, likeText(query.search)))
-          : undefined,
-        after
-          ? or(gt(companies.name, after[0]), and(eq(companies.name, after[0]), gt(companies.id, after[1])))
-          : undefined,
+        holdsText(query.search, companies.name, companies.code),
+        page.after,
       ),
     )
-    .orderBy(asc(companies.name), asc(companies.id))
+    .orderBy(...page.order)
     .limit(query.limit + 1);
   const numberOf = async (table: typeof sites | typeof people) =>
     new Map(

@@ -1,4 +1,4 @@
-import { and, asc, eq, like, or, type SQL } from 'drizzle-orm';
+import { and, asc, eq, type SQL } from 'drizzle-orm';
 import { alias } from 'drizzle-orm/mysql-core';
 import type { Reader } from '@/db/client';
 import { companies, sites } from '@/db/schema/companies';
@@ -8,7 +8,7 @@ import type { listParts, PartRow } from '@/shared/contracts/parts';
 import { plainDecimal } from '@/shared/domain/plain-decimal';
 import { Problem } from '@/shared/problems/problems';
 import { cursor, cutPage } from '../../http/page';
-import { likeText } from '../../http/search';
+import { holdsText } from '../../http/search';
 import { keyset, sortOf } from '../../http/sort';
 
 const supplier = alias(sites, 'supplier_site');
@@ -26,9 +26,7 @@ export async function partsPage(db: Reader, query: QueryOf<typeof listParts>) {
     where: and(
       query.type ? eq(parts.typeCode, query.type) : undefined,
       query.use ? eq(parts.active, query.use === 'in use') : undefined,
-      query.search
-        ? or(like(parts.number, likeText(query.search)), like(parts.name, likeText(query.search)))
-        : undefined,
+      holdsText(query.search, parts.number, parts.name),
       page.after,
     ),
   });

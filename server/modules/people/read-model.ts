@@ -1,4 +1,4 @@
-import { and, asc, eq, gt, inArray, isNotNull, isNull, like, or } from 'drizzle-orm';
+import { and, eq, inArray, isNotNull, isNull } from 'drizzle-orm';
 import type { Database } from '@/db/client';
 import { companies, people, personRoles } from '@/db/schema/companies';
 import type { listPeople, PersonRow } from '@/shared/contracts/people';
@@ -6,7 +6,8 @@ import type { QueryOf } from '@/shared/contracts/operation';
 import { Problem } from '@/shared/problems/problems';
 import { cursor, cutPage } from '../../http/page';
 import { type Person, scopeOf } from '../../http/person';
-import { likeText } from '../../http/search';
+import { holdsText } from '../../http/search';
+import { keyset } from '../../http/sort';
 
 const stateIs = {
   active: and(eq(people.active, true), isNotNull(people.passwordHash)),
@@ -16,7 +17,7 @@ const stateIs = {
 
 /** People by name, a page by key; a partner sees its own company's only. */
 export async function peoplePage(db: Database, person: Person, query: QueryOf<typeof listPeople>) {
-  const after = cursor(query.after, 2);
+  const page = keyset({ by: people.name, then: people.id, down: false, after: cursor(query.after, 2) });
   const company = scopeOf(person) ?? query.company;
   const found = await db
     .select({ person: people, company: { id: companies.id, name: companies.name, kind: companies.kind } })
@@ -26,15 +27,11 @@ export async function peoplePage(db: Database, person: Person, query: QueryOf<ty
       and(
         company ? eq(people.companyId, company) : undefined,
         query.state ? stateIs[query.state] : undefined,
-        query.search
-          ? or(like(people.name, likeText(query.search)), like(people.email, likeText(query.search)))
-          : undefined,
-        after
-          ? or(gt(people.name, after[0]), and(eq(people.name, after[0]), gt(people.id, after[1])))
-          : undefined,
+        holdsText(query.search, people.name, people.email),
+        page.after,
       ),
     )
-    .orderBy(asc(people.name), asc(people.id))
+    .orderBy(...page.order)
     .limit(query.limit + 1);
   return cutPage(await asRows(db, found), query.limit, (row) => [row.name, row.id]);
 }

@@ -1,4 +1,4 @@
-import { and, eq, inArray, like, or } from 'drizzle-orm';
+import { and, eq, inArray, or } from 'drizzle-orm';
 import type { Reader } from '@/db/client';
 import { containerTypes } from '@/db/schema/containers';
 import type { listPool, PoolRow } from '@/shared/contracts/pool';
@@ -7,7 +7,7 @@ import type { PoolPlan } from '@/shared/contracts/pool-sizing';
 import type { PoolInput, PoolSize } from '@/shared/domain/pool-size';
 import { Problem } from '@/shared/problems/problems';
 import { cursor, cutPage } from '../../http/page';
-import { likeText } from '../../http/search';
+import { holdsText } from '../../http/search';
 import { keyset, sortOf } from '../../http/sort';
 import { unitsInPool } from './in-pool';
 import { latestApprovals } from './latest-approvals';
@@ -30,7 +30,7 @@ export async function poolPage(db: Reader, query: QueryOf<typeof listPool>) {
         held.length > 0
           ? or(eq(containerTypes.active, true), inArray(code, held))
           : eq(containerTypes.active, true),
-        query.search ? or(like(name, likeText(query.search)), like(code, likeText(query.search))) : undefined,
+        holdsText(query.search, name, code),
         page.after,
       ),
     )

@@ -1,4 +1,4 @@
-import { and, desc, eq, getTableColumns, like, lt, or } from 'drizzle-orm';
+import { and, eq, getTableColumns } from 'drizzle-orm';
 import type { Database } from '@/db/client';
 import { companies } from '@/db/schema/companies';
 import { statements } from '@/db/schema/statements';
@@ -6,7 +6,8 @@ import type { QueryOf } from '@/shared/contracts/operation';
 import type { listStatements } from '@/shared/contracts/statements';
 import { cursor, cutPage } from '../../http/page';
 import { type Person, scopeOf } from '../../http/person';
-import { likeText } from '../../http/search';
+import { holdsText } from '../../http/search';
+import { keyset } from '../../http/sort';
 import { heldOf } from './held';
 import { statementRowOf } from './statement-rows';
 
@@ -18,7 +19,8 @@ export async function statementsPage(
   { query, person }: { query: QueryOf<typeof listStatements>; person: Person },
 ) {
   const scope = scopeOf(person);
-  const after = cursor(query.after, 2);
+  const { month, number } = statements;
+  const order = keyset({ by: month, then: number, down: true, after: cursor(query.after, 2) });
   const rows = await db
     .select({ row: columns, partner: { id: companies.id, name: companies.name } })
     .from(statements)
@@ -30,18 +32,11 @@ export async function statementsPage(
         query.partner ? eq(statements.companyId, query.partner) : undefined,
         query.state ? eq(statements.state, query.state) : undefined,
         query.answer ? eq(statements.answer, query.answer) : undefined,
-        query.search
-          ? or(like(companies.name, likeText(query.search)), like(statements.number, likeText(query.search)))
-          : undefined,
-        after
-          ? or(
-              lt(statements.month, after[0]),
-              and(eq(statements.month, after[0]), lt(statements.number, after[1])),
-            )
-          : undefined,
+        holdsText(query.search, companies.name, statements.number),
+        order.after,
       ),
     )
-    .orderBy(desc(statements.month), desc(statements.number))
+    .orderBy(...order.order)
     .limit(query.limit + 1);
   const page = cutPage(rows, query.limit, ({ row }) => [row.month, row.number]);
   const held = await heldOf(

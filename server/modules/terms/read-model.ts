@@ -1,4 +1,4 @@
-import { and, asc, eq, gt, inArray, like, or } from 'drizzle-orm';
+import { and, asc, eq, inArray } from 'drizzle-orm';
 import type { Database } from '@/db/client';
 import { companies, people, terms } from '@/db/schema/companies';
 import { containerTypes } from '@/db/schema/containers';
@@ -9,7 +9,8 @@ import { formatMinor } from '@/shared/domain/money';
 import { Problem } from '@/shared/problems/problems';
 import { cursor, cutPage } from '../../http/page';
 import { may, type Person, scopeOf } from '../../http/person';
-import { likeText } from '../../http/search';
+import { holdsText } from '../../http/search';
+import { keyset } from '../../http/sort';
 import { operatorDay } from '../partners/operator-day';
 import { plain } from '../statements/assessment-input';
 import { hasEvents } from './set-partner-terms';
@@ -37,7 +38,12 @@ export async function termsPage(
   { query, person, now }: { query: QueryOf<typeof listTerms>; person: Person; now: string },
 ) {
   const scope = scopeOf(person);
-  const after = cursor(query.after, 2);
+  const order = keyset({
+    by: companies.name,
+    then: companies.id,
+    down: false,
+    after: cursor(query.after, 2),
+  });
   const rows = await db
     .select()
     .from(companies)
@@ -45,15 +51,11 @@ export async function termsPage(
       and(
         eq(companies.kind, 'partner'),
         scope ? eq(companies.id, scope) : undefined,
-        query.search
-          ? or(like(companies.name, likeText(query.search)), like(companies.code, likeText(query.search)))
-          : undefined,
-        after
-          ? or(gt(companies.name, after[0]), and(eq(companies.name, after[0]), gt(companies.id, after[1])))
-          : undefined,
+        holdsText(query.search, companies.name, companies.code),
+        order.after,
       ),
     )
-    .orderBy(asc(companies.name), asc(companies.id))
+    .orderBy(...order.order)
     .limit(query.limit + 1);
   const page = cutPage(rows, query.limit, (row) => [row.name, row.id]);
   const ids = page.rows.map((row) => row.id);

@@ -165,6 +165,8 @@ describe('a container type', () => {
     await engineer.put('/container-types/OLD-1', change({ kind: 'box', active: false }));
     const old = await engineer.get('/container-types', { use: 'out of use' });
     expect(old.body.rows.map((row: { code: string }) => row.code)).toEqual(['OLD-1']);
+    const small = await engineer.get('/container-types', { search: 'old-', use: 'out of use' });
+    expect(small.body.rows).toEqual(old.body.rows);
     const lids = await engineer.get('/container-types', { kind: 'lid' });
     expect(lids.body.rows.map((row: { code: string }) => row.code)).toEqual([lane.lid.code]);
     const all = (await engineer.get('/container-types')).body.rows.map((row: { code: string }) => row.code);

@@ -27,6 +27,8 @@ describe('a packing specification', () => {
     expect((await engineer.put(`/parts/${added.body.id}`, { ...changed, active: false })).status).toBe(200);
     const found = await engineer.get('/parts', { search: 'header', use: 'out of use' });
     expect(found.body.rows.map((row: { unitsPerContainer: number }) => row.unitsPerContainer)).toEqual([24]);
+    const small = await engineer.get('/parts', { search: 'hx-22' });
+    expect(small.body.rows.map((row: { number: string }) => row.number)).toEqual(['HX-2210']);
     const down = await engineer.get('/parts', { sort: '-number', limit: '1' });
     const next = await engineer.get('/parts', { sort: '-number', limit: '1', after: down.body.next });
     expect([...down.body.rows, ...next.body.rows].map((row: { number: string }) => row.number)).toEqual([
