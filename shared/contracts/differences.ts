@@ -8,7 +8,6 @@ import { listQuery, pageOf } from './list';
 import { operation } from './operation';
 
 export const differenceKinds = ['fewer', 'more', 'overdue', 'unannounced'] as const;
-export type DifferenceKind = (typeof differenceKinds)[number];
 
 /** The ways a person can choose; "within tolerance" is a rule's. */
 export const chosenWays = [

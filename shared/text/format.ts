@@ -91,11 +91,6 @@ export function formatInstant(instant: string, zone: string): string {
   return `${formatDay(day)}, ${time}`;
 }
 
-/** The clock time alone: "14:10". */
-export function formatTime(instant: string, zone: string): string {
-  return inZone(instant, zone).time;
-}
-
 function inZone(instant: string, zone: string): { day: string; time: string } {
   const parts = new Intl.DateTimeFormat('en-GB', {
     timeZone: zone,

@@ -79,9 +79,4 @@ function print(): void {
   console.log(`${LARGE.shipments} take ${ratio.toFixed(1)} times as long as ${SMALL.shipments}`);
 }
 
-/** For the runner of all benchmarks. */
-export async function benchReconcile(): Promise<{ name: string; figures: Figures }> {
-  return { name: 'reconcile', figures: measureReconciliation() };
-}
-
 if (require.main === module) print();

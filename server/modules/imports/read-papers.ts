@@ -5,8 +5,6 @@ import { receiptLines, receipts } from '@/db/schema/work';
 import type { MatchPaper } from '@/shared/contracts/import-results';
 import { sitesById } from '../partners/sites';
 
-export type ReceiptRow = typeof receipts.$inferSelect;
-
 /** Shipments with their declared lines, by id, as one side of a match. */
 export async function shipmentPapers(db: Reader, ids: readonly string[]): Promise<Map<string, MatchPaper>> {
   if (ids.length === 0) return new Map();

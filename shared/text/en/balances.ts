@@ -19,7 +19,7 @@ export const balances = {
     partner: 'Each container type stands here once units are on their way to you.',
   },
   search: 'Company',
-  filter: { type: 'Container type', asOf: 'At the end of', company: 'Company' },
+  filter: { type: 'Container type', asOf: 'At the end of' },
   column: {
     company: 'Company',
     type: 'Container type',

@@ -90,7 +90,6 @@ export const containerTypes = {
   onPalletLead:
     'How many stand side by side on one layer, none over the edge, each along or across. Geometry alone: it says nothing of load, height or how the stack holds.',
   perLayer: (units: number, pallet: string) => `${formatUnits(units)} a layer on ${pallet}`,
-  perLayerFrom: (outer: string, pallet: string) => `outer ${outer} mm on ${pallet} mm`,
   pool: 'Pool of this type',
 
   form: {

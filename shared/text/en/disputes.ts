@@ -45,8 +45,6 @@ export const disputes = {
     emptyPartnerBody:
       'To dispute a count, open its shipment. To dispute money, open the line on the statement. What you send stands here.',
     toShipments: 'Open shipments',
-    narrowedEmpty: 'No dispute fits what you asked for',
-    narrowedEmptyBody: 'Take a filter away to see more.',
     filter: {
       state: 'State',
       subject: 'About',
@@ -55,10 +53,8 @@ export const disputes = {
       open: 'Plant has the next word',
       waiting: 'Partner has the next word',
       decided: 'Decided',
-      anySubject: 'Counts and statements',
       count: 'Counts',
       line: 'Statement lines',
-      anyPartner: 'All partners',
     },
     column: {
       about: 'About',
@@ -88,7 +84,6 @@ export const disputes = {
     return `${formatUnits(row.claimed)} instead of ${formatUnits(row.stated)} ${row.typeName ?? ''}`.trim();
   },
   detail: {
-    back: 'Disputes',
     bookSays: 'The book says',
     partnerSays: (company: string) => `${company} says`,
     heldBack: 'Held back',

@@ -189,8 +189,6 @@ export const imports = {
     openHead: 'Not counted yet, whole book',
     onTheWay: 'On the way',
     overdue: 'Of these overdue',
-    what: 'What',
-    number: 'Number',
   },
   matches: {
     head: 'Receipts and their shipments',
@@ -213,7 +211,6 @@ export const imports = {
     choose: (shipment: string, receipt: string) => `${shipment} with ${receipt}`,
     accept: (count: number) => (count === 0 ? 'Accept' : `Accept ${formatUnits(count)}`),
     refuse: (count: number) => (count === 0 ? 'Refuse' : `Refuse ${formatUnits(count)}`),
-    chooseFirst: 'Choose one or more.',
     decided: (count: number) =>
       `${formatUnits(count)} ${plural(count, { one: 'suggestion', other: 'suggestions' })} decided.`,
     skipped: (count: number) =>
@@ -243,7 +240,6 @@ export const imports = {
       count === 0 ? 'Book as unannounced' : `Book ${formatUnits(count)} as unannounced`,
     booked: (count: number) =>
       `${formatUnits(count)} ${plural(count, { one: 'receipt', other: 'receipts' })} booked.`,
-    chooseOne: (name: string) => `Choose ${name}`,
     empty: { title: 'No receipts of this kind' },
     rowIn: (row: number) => `row ${formatUnits(row)}`,
   },

@@ -62,7 +62,6 @@ export const parts = {
   legs: 'Legs',
   legsLead: 'The time for which a container is tied up, leg by leg, in working days.',
   leg: {
-    head: (at: number) => `Leg ${at}`,
     name: 'Leg',
     stretch: 'Where',
     mean: 'Days',
@@ -113,6 +112,5 @@ export const parts = {
       'Working days are Monday to Friday; public holidays are not taken out. Shipments that were never declared, and those taken as counted without a count, are left out of the ways.',
     idle: 'What lies idle in a stock counts as time there. A pool sized by the days seen keeps that idle stock; set the days that the work needs if they are fewer.',
     spread: 'Where several legs share a stretch, its days are spread over them as planned.',
-    cannotSee: 'The book cannot see this leg by itself.',
   },
 } as const;

@@ -1,4 +1,3 @@
-import { plural } from '../plural';
 
 export const people = {
   title: 'People',
@@ -29,7 +28,6 @@ export const people = {
     name: 'Name',
     email: 'Mail',
     company: 'Company',
-    ownCompany: 'Choose a company',
     roles: 'What they do',
     active: 'May sign in',
     activeHint: 'Taken out, they are signed out everywhere at once.',
@@ -45,5 +43,4 @@ export const people = {
   },
   save: 'Save',
   send: 'Send the invitation',
-  rolesHeld: (count: number) => plural(count, { one: '1 role', other: `${count} roles` }),
 };

@@ -1,5 +1,4 @@
 import { formatDay, formatNumber, formatShare, formatUnits } from '../format';
-import { plural } from '../plural';
 
 /** A share that is not 0 never reads as 0, nor one that is not all as 100 %. */
 function share(value: number): string {
@@ -37,14 +36,12 @@ export const pool = {
   asApproved: 'as approved',
   asNeeded: 'as needed',
   notPlanned: 'not planned',
-  notReckoned: 'not reckoned yet',
   sites: (under: number, over: number) =>
     [under > 0 ? `${formatUnits(under)} under` : '', over > 0 ? `${formatUnits(over)} over` : '']
       .filter((words) => words !== '')
       .join(', '),
 
   question: (many: string) => `How many ${many} do we need?`,
-  kicker: (name: string) => `Pool / ${name}`,
   approvedTag: (size: number, day: string) => `approved ${formatUnits(size)}, ${formatDay(day, 'date')}`,
   approve: (size: number) => `Approve ${formatUnits(size)}`,
   save: 'Save these assumptions',
@@ -215,5 +212,4 @@ export const pool = {
   },
   approveNow: 'Approve',
   approvedNow: (size: number) => `Approved: ${formatUnits(size)}.`,
-  legsCount: (legs: number) => `${formatUnits(legs)} ${plural(legs, { one: 'leg', other: 'legs' })}`,
 } as const;

@@ -16,7 +16,6 @@ export const shipments = {
   contents: { empties: 'empties', fulls: 'fulls' },
   count: 'Count',
   countThis: 'Count this delivery',
-  adjust: 'Adjust stock',
 
   column: {
     reference: 'Shipment',
@@ -61,14 +60,12 @@ export const shipments = {
   more: (units: number) => `${formatUnits(units)} more than declared`,
   settledDifference: (units: number) =>
     `${formatUnits(Math.abs(units))} ${units < 0 ? 'fewer' : 'more'}, settled`,
-  note: 'Note',
   countsHead: 'Who sent and counted',
   laterCount: (sequence: number) => `Count ${formatUnits(sequence)}, turned up later`,
   countedBy: (name: string, when: string) => `Counted by ${name}, ${when}`,
   countedByImport: (when: string) => `Counted, taken from a file, ${when}`,
   countedAutomatically: (when: string) => `Taken as counted as declared, ${when}`,
   countedOn: (when: string) => `Counted ${when}`,
-  photo: (name: string) => `Open ${name}`,
   settlementsHead: 'How differences were settled',
   settled: (way: string, units: number) => `${formatUnits(units)} ${way}`,
   settle: 'Settle the difference',

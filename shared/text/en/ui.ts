@@ -33,7 +33,6 @@ export const ui = {
   quote: (requestId: string) => `If you ask for help, quote ${requestId}.`,
   draftKept: 'What you typed earlier is still here.',
   startFresh: 'Start with an empty form',
-  search: 'Search',
   filterAndSort: 'Filter and sort',
   sortedBy: 'Sort by',
   ascending: 'first to last',
