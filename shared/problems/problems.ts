@@ -13,7 +13,6 @@ export const problemStatus = {
   'not allowed': 403,
   'request not trusted': 403,
   'not found': 404,
-  'method not known': 405,
   'already exists': 409,
   'already counted': 409,
   'already settled': 409,

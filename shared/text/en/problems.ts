@@ -64,7 +64,6 @@ export const problems: Record<ClientProblemCode, (data: Data) => string> = {
   'not allowed': () => 'Your role does not allow this. Nothing was changed.',
   'request not trusted': () => 'This page is older than your sign-in. Reload it and send again.',
   'not found': () => 'There is nothing here under this address, or it is not yours to see.',
-  'method not known': () => 'This cannot be done here. Reload the page.',
   'already exists': (data) =>
     `${word(data, 'what', 'This')} exists already. Choose another, or open the one there is.`,
   'already counted': (data) => {
