@@ -59,7 +59,7 @@ function What({ row }: { row: Row }) {
 export function DifferencesCard({ today }: { today: Today }) {
   const { differences } = today;
   const wide = useIsWide();
-  if (!differences || differences.total === 0) return null;
+  if (!differences || differences.rows.length === 0) return null;
   if (!wide) return <DifferencesOnPhone differences={differences} />;
   return (
     <Card

@@ -1,4 +1,4 @@
-import { and, asc, count, desc, eq, or } from 'drizzle-orm';
+import { and, asc, desc, eq, or } from 'drizzle-orm';
 import type { Reader } from '@/db/client';
 import { companies } from '@/db/schema/companies';
 import { containerTypes } from '@/db/schema/containers';
@@ -8,6 +8,7 @@ import type { Today } from '@/shared/contracts/today';
 import { daysBetween } from '@/shared/domain/calendar';
 import { formatMinor } from '@/shared/domain/money';
 import { may, type Person, scopeOf } from '../../http/person';
+import { countListed } from '../differences/count-listed';
 import { fromSite, toSite } from '../shipments/shipment-rows';
 
 /** Open differences, the oldest first: the coordinator's to settle. */
@@ -20,9 +21,8 @@ export async function differencesToSettle(
     .where(eq(differences.state, 'open'))
     .orderBy(asc(differences.openedOn), asc(differences.id))
     .limit(6);
-  const [all] = await db.select({ total: count() }).from(differences).where(eq(differences.state, 'open'));
   return {
-    total: all?.total ?? 0,
+    total: await countListed(db, day),
     rows: rows.map((row) => ({
       ...shown(row),
       openDays: Math.max(0, daysBetween(row.difference.openedOn, day)),

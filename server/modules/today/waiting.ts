@@ -1,16 +1,13 @@
 import { and, count, eq, inArray } from 'drizzle-orm';
 import type { Reader } from '@/db/client';
-import { differences, disputes } from '@/db/schema/differences';
+import { disputes } from '@/db/schema/differences';
 import { shipments } from '@/db/schema/shipments';
 import { statements } from '@/db/schema/statements';
 import { may, type Person, scopeOf } from '../../http/person';
+import { countListed } from '../differences/count-listed';
 
 /** How much waits for this person in each place; places where nothing waits are left out. */
-export async function waitingFor(
-  db: Reader,
-  person: Person,
-  _today: string,
-): Promise<Record<string, number>> {
+export async function waitingFor(db: Reader, person: Person, today: string): Promise<Record<string, number>> {
   const scope = scopeOf(person);
   const waiting: Record<string, number> = {};
   const put = async (
@@ -28,9 +25,7 @@ export async function waitingFor(
       .from(shipments)
       .where(and(eq(shipments.state, 'on the way'), eq(shipments.toCompanyId, person.companyId))),
   );
-  await put('differences', may(person, 'see differences'), () =>
-    db.select({ n: count() }).from(differences).where(eq(differences.state, 'open')),
-  );
+  await put('differences', may(person, 'see differences'), async () => [{ n: await countListed(db, today) }]);
   await put('disputes', may(person, 'see disputes'), () =>
     db
       .select({ n: count() })
