@@ -25,7 +25,7 @@ export function Card({ children, title, level = 2, beside, gap = 'm', grow, leas
       style={[
         styles.card,
         { gap: space[gap] },
-        grow && { flexGrow: 1, flexShrink: 1, flexBasis: least ?? 280 },
+        grow && { flexGrow: 1, flexShrink: 1, flexBasis: least ?? 280, minHeight: 'auto' as const },
         tone && { borderLeftWidth: 4, borderLeftColor: tones[tone].line },
       ]}
     >
