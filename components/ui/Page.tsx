@@ -5,6 +5,7 @@ import { column, space } from '../theme/measures';
 import { useBreakpoint } from '../theme/use-breakpoint';
 import { Box } from './Box';
 import { Link } from './Link';
+import { NotPrinted } from './NotPrinted';
 import { Text } from './Text';
 
 type Props = {
@@ -69,13 +70,15 @@ function Head({ title, kicker, lead, back, beside, action }: HeadProps) {
     <Box row wrap spread="between" align="end" gap="m">
       <Box gap="xs">
         {back === undefined ? null : (
-          <Link
-            href={back.href}
-            label={`‹ ${back.label}`}
-            name={text.ui.back(back.label)}
-            tone="soft"
-            strong={false}
-          />
+          <NotPrinted>
+            <Link
+              href={back.href}
+              label={`‹ ${back.label}`}
+              name={text.ui.back(back.label)}
+              tone="soft"
+              strong={false}
+            />
+          </NotPrinted>
         )}
         {kicker === undefined ? null : <Text variant="soft">{kicker}</Text>}
         <Text variant="head" id="page-head">
