@@ -22,11 +22,16 @@ export function movementColumns(onTakeBack: (row: MovementRow) => void): Column<
       cell: (row) => <Figure units={row.units} />,
       cardRole: 'aside',
     },
-    { key: 'day', head: head.day, cell: (row) => formatDay(row.valueDate) },
+    { key: 'day', head: head.day, cell: (row) => formatDay(row.valueDate), whole: true },
     { key: 'from', head: head.from, cell: (row) => words.place(row.from) },
     { key: 'to', head: head.to, cell: (row) => words.place(row.to) },
     { key: 'by', head: head.by, cell: (row) => row.by ?? '', cardRole: 'hidden' },
-    { key: 'shipment', head: head.shipment, cell: (row) => <Behind row={row} onTakeBack={onTakeBack} /> },
+    {
+      key: 'shipment',
+      head: head.shipment,
+      cell: (row) => <Behind row={row} onTakeBack={onTakeBack} />,
+      whole: true,
+    },
   ];
 }
 

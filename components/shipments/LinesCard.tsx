@@ -1,5 +1,6 @@
 import type { ShipmentDetail } from '@/shared/contracts/shipments';
 import { text } from '@/shared/text/catalogue';
+import { Box } from '../ui/Box';
 import { Card } from '../ui/Card';
 import { Figure } from '../ui/Figure';
 import { Sheet, type SheetColumn } from '../ui/Sheet';
@@ -52,10 +53,10 @@ export function LinesCard({ shipment }: { shipment: ShipmentDetail }) {
 function Counted({ line }: { line: Line }) {
   if (line.countedNow === line.counted || line.counted === null) return figure(line.counted);
   return (
-    <>
+    <Box gap="xs" align="end">
       {figure(line.countedNow)}
       <Text variant="small">{words.firstCounted(line.counted)}</Text>
-    </>
+    </Box>
   );
 }
 

@@ -67,7 +67,7 @@ export const shipments = {
   countedAutomatically: (when: string) => `Taken as counted as declared, ${when}`,
   countedOn: (when: string) => `Counted ${when}`,
   settlementsHead: 'How differences were settled',
-  settled: (way: string, units: number) => `${formatUnits(units)} ${way}`,
+  settled: (way: string, units: number) => `${way}, ${formatUnits(units)}`,
   settle: 'Settle the difference',
   dispute: 'Dispute this count',
   entriesHead: 'Entries in the book',
