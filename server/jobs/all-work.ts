@@ -5,6 +5,7 @@ import { importJob } from '../modules/imports/confirm-import';
 import { runImport } from '../modules/imports/run-import';
 import { bookCheck } from '../modules/balances/check-book';
 import { monthJobs } from '../modules/months/close-month';
+import { resetJob, sendReset } from '../modules/session/send-reset';
 import { draftMonth } from '../modules/statements/draft-month';
 import { issueMonth } from '../modules/statements/issue-month';
 import { watchSilence } from '../modules/statements/silence';
@@ -14,6 +15,7 @@ import { automaticCountJobs, automaticCounts } from '../modules/shipments/auto-c
 export const jobHandlers: Record<string, JobHandler> = {
   ...automaticCountJobs,
   [importJob]: runImport,
+  [resetJob]: sendReset,
   [monthJobs.drafts]: draftMonth,
   [monthJobs.issue]: issueMonth,
 };

@@ -2,7 +2,16 @@ import { spawnSync } from 'node:child_process';
 import { existsSync } from 'node:fs';
 
 /** `npm run bench`: each benchmark by itself, one after another; a figure for speed is a ratio within the same run. */
-const benches = ['assess', 'reconcile', 'pool-size', 'growth', 'import', 'first-load'];
+const benches = [
+  'assess',
+  'reconcile',
+  'pool-size',
+  'growth',
+  'import',
+  'month-end',
+  'address-known',
+  'first-load',
+];
 const wanted = process.argv.length > 2 ? process.argv.slice(2) : benches;
 const failed = [];
 for (const name of wanted) {

@@ -11,13 +11,13 @@ import { readPerson } from '../../http/person';
 import { type Limits, useTry } from '../../http/rate-limit';
 import { type Circumstances, open, type Route } from '../../http/route';
 import { csrfTokenOf } from '../../http/trust';
-import { queueMail } from '../../mail/outbox';
-import { resetMail } from '../../mail/letters';
+import { queueJob } from '../../jobs/job-queue';
 import { writeLog } from '../log/write-log';
 import { isTooCommon } from './known-passwords';
 import { passwordFits } from './password';
+import { resetJob } from './send-reset';
 import { signedInOf } from './signed-in';
-import { choosePasswordBy, makeToken, setPassword } from './tokens';
+import { choosePasswordBy, setPassword } from './tokens';
 
 export function sessionRoutes(limits: Limits): Route[] {
   return [
@@ -37,12 +37,11 @@ export function sessionRoutes(limits: Limits): Route[] {
       if (person) await writeLog(db, { at, person, action: 'signOut', outcome: 'done' });
       return { csrfToken: csrfTokenOf(request, true) };
     }),
-    open(contracts.askForReset, async ({ body, db, deps, at }) => {
+    open(contracts.askForReset, async ({ body, db, at }) => {
       await useTry(limits.links, `address:${at.address}`);
       await useTry(limits.links, `mail:${body.email}`);
-      // Not awaited: a known address must not take longer than an unknown one.
-      void sendReset(deps, { email: body.email, at }).catch((error: unknown) =>
-        deps.logger.error({ err: error }, 'reset link not written'),
+      await inTransaction(db, (tx) =>
+        queueJob(tx, { kind: resetJob, payload: body, onceKey: `${resetJob} ${at.requestId}`, now: at.now }),
       );
       await writeLog(db, { at, person: null, action: 'askForReset', outcome: 'done' });
       return { sent: true as const };
@@ -110,16 +109,6 @@ function refuseCommon(password: string, own: readonly string[]): void {
       fields: [{ path: 'password', message: 'Too easy to guess. Choose another' }],
     });
   }
-}
-
-async function sendReset(deps: Deps, { email, at }: { email: string; at: Circumstances }): Promise<void> {
-  const [row] = await deps.db.select().from(people).where(eq(people.email, email));
-  if (!row?.active) return;
-  await inTransaction(deps.db, async (tx) => {
-    const token = await makeToken(tx, { personId: row.id, purpose: 'reset', now: at.now });
-    const link = `${deps.config.PUBLIC_URL}/choose-password?token=${token}`;
-    await queueMail(tx, { to: row, now: at.now, ...resetMail({ name: row.name, link }) });
-  });
 }
 
 /** A new session id at every sign-in: passport regenerates the session, so a planted id is not adopted. */

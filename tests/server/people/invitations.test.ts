@@ -94,7 +94,7 @@ describe('an invitation', () => {
     const known = await stranger.post('/password-resets', { email: jonas.email });
     const unknown = await stranger.post('/password-resets', { email: 'nobody@nowhere.example' });
     expect([known.status, known.body]).toEqual([unknown.status, unknown.body]);
-    await new Promise((resolve) => setTimeout(resolve, 300));
+    await product.runJobs();
     expect((await lastLetter(administrator, jonas.email)).subject).toBe('Choose a new password');
     expect(await lastLetter(administrator, 'nobody@nowhere.example')).toBeUndefined();
   });

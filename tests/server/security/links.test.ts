@@ -1,4 +1,3 @@
-import { setTimeout as pause } from 'node:timers/promises';
 import { sendWaiting } from '@/server/mail/send-waiting';
 import { aProduct, type Product } from '../../support/app';
 import { ask, type Held, opened, signedIn } from './browser';
@@ -23,13 +22,11 @@ const rows = async (sql: string, given: unknown[] = []) =>
 /** Asks for a link as someone who forgot the password; returns the letter's text. */
 async function letterTo(email: string, headers: Record<string, string> = {}): Promise<string> {
   await ask(product.app, 'post', '/password-resets')({ ...held, headers }).send({ email });
-  for (let tries = 0; tries < 50; tries += 1) {
-    const [letter] = await rows('SELECT text FROM outbox WHERE to_address = ? ORDER BY id DESC LIMIT 1', [
-      email,
-    ]);
-    if (letter) return String(letter.text);
-    await pause(40);
-  }
+  await product.runJobs();
+  const [letter] = await rows('SELECT text FROM outbox WHERE to_address = ? ORDER BY id DESC LIMIT 1', [
+    email,
+  ]);
+  if (letter) return String(letter.text);
   throw new Error('no letter came');
 }
 const tokenIn = (text: string): string => /token=([\w-]+)/.exec(text)?.[1] ?? '';
