@@ -41,25 +41,27 @@ const loggedRefusals: ReadonlySet<ProblemCode> = new Set([
 
 function problemOf(error: unknown): Problem {
   if (error instanceof Problem) return error;
+  if (isCsrf(error)) return new Problem('request not trusted');
+  if (isAddressError(error)) return new Problem('not found');
   if (isBodyError(error)) {
     if (error.type === 'entity.too.large') return new Problem('too large', { data: { megabytes: 1 } });
     return new Problem('not valid', {
       fields: [{ path: '', message: 'The body is not JSON that can be read' }],
     });
   }
-  if (isAddressError(error)) return new Problem('not found');
-  if (isCsrf(error)) return new Problem('request not trusted');
   if (isAway(error)) return new Problem('database away');
   return new Problem('failed here');
 }
 
-function isBodyError(error: unknown): error is { type: string } {
+/** What reading a body fails with: too large, cut off, not JSON, not the compression that it says. */
+function isBodyError(error: unknown): error is { status: number; type?: string } {
   return (
     typeof error === 'object' &&
     error !== null &&
-    'type' in error &&
-    typeof error.type === 'string' &&
-    'status' in error
+    'status' in error &&
+    typeof error.status === 'number' &&
+    error.status >= 400 &&
+    error.status < 500
   );
 }
 

@@ -63,10 +63,16 @@ describe('a body', () => {
     const { status, body } = await post(JSON.stringify({ reason: 'x'.repeat(1_100_000) }));
     expect([status, body.code]).toEqual([413, 'too large']);
     const bomb = gzipSync(JSON.stringify({ reason: 'x'.repeat(30_000_000) }));
-    const packed = await lane.coordinator.post('/adjustments', bomb, {
-      headers: { ...json, 'content-encoding': 'gzip' },
-    });
+    const packed = await lane.coordinator
+      .post('/adjustments', undefined, { headers: { ...json, 'content-encoding': 'gzip' } })
+      .serialize(() => bomb as never)
+      .send({});
     expect([bomb.length < 100_000, packed.status]).toEqual([true, 413]);
+    const broken = await lane.coordinator
+      .post('/adjustments', undefined, { headers: { ...json, 'content-encoding': 'gzip' } })
+      .serialize(() => 'no gzip at all')
+      .send({});
+    expect(broken.status).toBe(400);
   });
 
   it.each([
