@@ -7,7 +7,7 @@ import { Box } from '../ui/Box';
 import { Card, Rule } from '../ui/Card';
 import { Figure } from '../ui/Figure';
 import { Link } from '../ui/Link';
-import { StoredFile, StoredFiles } from '../ui/StoredFile';
+import { StoredFileList } from '../ui/StoredFile';
 import { Text } from '../ui/Text';
 import { SettleForm } from './SettleForm';
 
@@ -79,18 +79,7 @@ function CountCard({ difference: { count, timeZone } }: Props) {
     <Card title={words.countHead} level={3}>
       <Text>{said}</Text>
       {count.note === '' ? null : <Text>{count.note}</Text>}
-      {count.photos.length === 0 ? null : (
-        <StoredFiles>
-          {count.photos.map(({ id, name, mediaType }) => (
-            <StoredFile
-              key={id}
-              name={name}
-              href={urlOf(downloadFile, { params: { file: id } })}
-              isPicture={mediaType.startsWith('image/')}
-            />
-          ))}
-        </StoredFiles>
-      )}
+      <StoredFileList files={count.photos} hrefOf={(file) => urlOf(downloadFile, { params: { file } })} />
     </Card>
   );
 }

@@ -5,7 +5,7 @@ import { urlOf } from '../data/url-of';
 import { useSignedIn } from '../data/use-session';
 import { Box } from '../ui/Box';
 import { Card } from '../ui/Card';
-import { StoredFile, StoredFiles } from '../ui/StoredFile';
+import { StoredFileList } from '../ui/StoredFile';
 import { Text } from '../ui/Text';
 
 const words = text.disputes.detail;
@@ -34,18 +34,10 @@ function Word({ dispute, message, timeZone }: WordProps) {
         <Text variant="small">{formatInstant(at, timeZone)}</Text>
       </Box>
       {message.text === '' ? <Text variant="soft">{words.noWords}</Text> : <Text>{message.text}</Text>}
-      {files.length === 0 ? null : (
-        <StoredFiles>
-          {files.map((file) => (
-            <StoredFile
-              key={file.id}
-              name={file.name}
-              href={urlOf(downloadDisputeFile, { params: { dispute: dispute.id, file: file.id } })}
-              isPicture={file.mediaType.startsWith('image/')}
-            />
-          ))}
-        </StoredFiles>
-      )}
+      <StoredFileList
+        files={files}
+        hrefOf={(file) => urlOf(downloadDisputeFile, { params: { dispute: dispute.id, file } })}
+      />
     </Card>
   );
 }

@@ -1,13 +1,11 @@
 import { Fragment, type ReactNode } from 'react';
-import { text } from '@/shared/text/catalogue';
 import { Problem } from '../data/Problem';
+import { PageEnd } from '../tables/PageEnd';
 import type { Pages } from '../tables/RecordList';
 import { Box } from '../ui/Box';
-import { Button } from '../ui/Button';
 import { Card } from '../ui/Card';
 import { EmptyState } from '../ui/EmptyState';
 import { Skeleton } from '../ui/Skeleton';
-import { Text } from '../ui/Text';
 
 type Props<Row> = {
   list: Pages;
@@ -28,19 +26,7 @@ export function PagedCards<Row>({ list, card, rowKey, empty }: Props<Row>) {
       {rows.map((row) => (
         <Fragment key={rowKey(row)}>{card(row)}</Fragment>
       ))}
-      <Box row wrap spread="between">
-        <Text variant="small" role="status">
-          {list.hasNextPage ? text.ui.shown(rows.length) : text.ui.allShown(rows.length)}
-        </Text>
-        {list.hasNextPage ? (
-          <Button
-            kind="secondary"
-            label={text.ui.showMore}
-            busy={list.isFetchingNextPage ?? false}
-            onPress={() => void list.fetchNextPage?.()}
-          />
-        ) : null}
-      </Box>
+      <PageEnd list={list} shown={rows.length} />
     </Box>
   );
 }

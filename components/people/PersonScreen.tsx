@@ -36,20 +36,13 @@ export function PersonScreen({ person }: { person: string }) {
 
 function Invited({ person }: { person: PersonRow }) {
   const post = usePost(inviteAgain, { refreshes: ['letters'] });
-  const send = async (): Promise<void> => {
-    await post.mutateAsync({ params: { person: person.id } });
-    announce(words.sentAgain);
-  };
+  const send = () =>
+    post.mutate({ params: { person: person.id } }, { onSuccess: () => announce(words.sentAgain) });
   return (
     <Card>
       <Text>{words.states.invited}</Text>
       {post.error ? <Problem error={post.error} /> : null}
-      <Button
-        kind="secondary"
-        label={words.again}
-        busy={post.isPending}
-        onPress={() => void send().catch(() => undefined)}
-      />
+      <Button kind="secondary" label={words.again} busy={post.isPending} onPress={send} />
     </Card>
   );
 }

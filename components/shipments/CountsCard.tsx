@@ -5,7 +5,7 @@ import { formatInstant } from '@/shared/text/format';
 import { urlOf } from '../data/url-of';
 import { Box } from '../ui/Box';
 import { Card } from '../ui/Card';
-import { StoredFile, StoredFiles } from '../ui/StoredFile';
+import { StoredFileList } from '../ui/StoredFile';
 import { Text } from '../ui/Text';
 
 const words = text.shipments;
@@ -32,18 +32,7 @@ function OneCount({ count, timeZone }: { count: Count; timeZone: string }) {
       <Text>{saidOf(count, formatInstant(count.countedAt, timeZone))}</Text>
       {count.sequence > 1 ? <Text variant="soft">{words.laterCount(count.sequence)}</Text> : null}
       {count.note === '' ? null : <Text>{count.note}</Text>}
-      {count.photos.length === 0 ? null : (
-        <StoredFiles>
-          {count.photos.map(({ id, name, mediaType }) => (
-            <StoredFile
-              key={id}
-              name={name}
-              href={urlOf(downloadFile, { params: { file: id } })}
-              isPicture={mediaType.startsWith('image/')}
-            />
-          ))}
-        </StoredFiles>
-      )}
+      <StoredFileList files={count.photos} hrefOf={(file) => urlOf(downloadFile, { params: { file } })} />
     </Box>
   );
 }

@@ -7,9 +7,9 @@ import { Button } from '../ui/Button';
 import { Card } from '../ui/Card';
 import { EmptyState } from '../ui/EmptyState';
 import { Skeleton } from '../ui/Skeleton';
-import { Text } from '../ui/Text';
 import type { Column } from './column';
 import { ListTools, type Filter } from './ListTools';
+import { PageEnd } from './PageEnd';
 import { RecordCardList } from './RecordCardList';
 import { RecordTable } from './RecordTable';
 import type { ListState } from './use-list-state';
@@ -79,19 +79,7 @@ function Rows<Row>({ label, list, columns, rowKey, rowHref, state, empty }: Rows
         <RecordCardList {...shared} />
       )}
       {list.error ? <Problem error={list.error} onRetry={() => void list.refetch?.()} /> : null}
-      <Box row wrap spread="between">
-        <Text variant="small" role="status">
-          {list.hasNextPage ? text.ui.shown(rows.length) : text.ui.allShown(rows.length)}
-        </Text>
-        {list.hasNextPage ? (
-          <Button
-            kind="secondary"
-            label={text.ui.showMore}
-            busy={list.isFetchingNextPage ?? false}
-            onPress={() => void list.fetchNextPage?.()}
-          />
-        ) : null}
-      </Box>
+      <PageEnd list={list} shown={rows.length} />
     </Box>
   );
 }

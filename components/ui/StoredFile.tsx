@@ -39,3 +39,20 @@ export function StoredFile({ name, href, isPicture, onRemove }: Props) {
 export function StoredFiles({ children }: { children: React.ReactNode }) {
   return <div className="tk-files">{children}</div>;
 }
+
+type ListProps = {
+  files: readonly { id: string; name: string; mediaType: string }[];
+  hrefOf: (id: string) => string;
+};
+
+/** What hangs on a count or a word of a thread; nothing where there are no files. */
+export function StoredFileList({ files, hrefOf }: ListProps) {
+  if (files.length === 0) return null;
+  return (
+    <StoredFiles>
+      {files.map(({ id, name, mediaType }) => (
+        <StoredFile key={id} name={name} href={hrefOf(id)} isPicture={mediaType.startsWith('image/')} />
+      ))}
+    </StoredFiles>
+  );
+}

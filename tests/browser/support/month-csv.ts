@@ -1,7 +1,7 @@
 import { addDays } from '@/shared/domain/calendar';
+import { monthFileHeads } from '../../support/month-file';
 import { today } from './scene';
 
-const heads = 'Side;Reference;From site;To site;Date;Container type;Units;Damaged;To clean';
 type Row = {
   side: 'shipment' | 'receipt';
   reference?: string;
@@ -16,7 +16,11 @@ export function csvUpload(name: string, rows: readonly Row[]) {
   const lines = rows.map(({ side, reference = '', lane = 'TARNBY;KESTREL', daysAgo, type, units }) =>
     [side, reference, lane, addDays(today(), -daysAgo), type ?? 'TOTE-64', units, '', ''].join(';'),
   );
-  return { name, mimeType: 'text/csv', buffer: Buffer.from([heads, ...lines, ''].join('\r\n')) };
+  return {
+    name,
+    mimeType: 'text/csv',
+    buffer: Buffer.from([monthFileHeads.join(';'), ...lines, ''].join('\r\n')),
+  };
 }
 
 /**
