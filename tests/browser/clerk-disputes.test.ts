@@ -68,6 +68,8 @@ for (const device of bothDevices) {
       await inge.sees('Five stood behind the rack. Three we do not find.');
       await inge.sees('5 of 8 accepted. The count stands at 117.');
       await inge.follow(`Shipment ${reference}`);
+      await inge.sees('117');
+      await inge.sees('first counted 112');
       await inge.sees('3 fewer than declared');
       await inge.isInOrder();
     },
