@@ -7,7 +7,8 @@ import { shipments } from '@/db/schema/shipments';
 import { formatMinor } from '@/shared/domain/money';
 import { holdsText } from '../../http/search';
 import { keyset } from '../../http/sort';
-import { endsOf, fromCompany, fromSite, laneColumns, onLaneOf, toCompany, toSite } from './lane-ends';
+import { fromCompany, fromSite, toCompany, toSite } from '../shipments/shipment-rows';
+import { endsOf, laneColumns, onLaneOf } from './lane-ends';
 import type { Asked, Found } from './list-differences';
 
 /** Differences between declaration and count, open or settled. */

@@ -1,11 +1,5 @@
 import { eq, or, type SQL } from 'drizzle-orm';
-import { alias } from 'drizzle-orm/mysql-core';
-import { companies, sites } from '@/db/schema/companies';
-
-export const fromSite = alias(sites, 'from_site');
-export const toSite = alias(sites, 'to_site');
-export const fromCompany = alias(companies, 'from_company');
-export const toCompany = alias(companies, 'to_company');
+import { fromCompany, fromSite, toCompany, toSite } from '../shipments/shipment-rows';
 
 export const laneColumns = {
   fromSite: fromSite.name,
@@ -20,7 +14,7 @@ export const laneColumns = {
   toCurrency: toCompany.currency,
 };
 
-type Lane = {
+export type Lane = {
   fromSite: string;
   toSite: string;
   fromCompanyId: string;

@@ -4,18 +4,11 @@ import { containerTypes } from '@/db/schema/containers';
 import { shipmentLines, shipments } from '@/db/schema/shipments';
 import { holdsText } from '../../http/search';
 import { keyset } from '../../http/sort';
-import {
-  endsOf,
-  fromCompany,
-  fromSite,
-  laneColumns,
-  onLaneOf,
-  partnerOf,
-  toCompany,
-  toSite,
-} from './lane-ends';
+import { overdueBy } from '../shipments/list-shipments';
+import { fromCompany, fromSite, toCompany, toSite } from '../shipments/shipment-rows';
+import { laneColumns, onLaneOf } from './lane-ends';
 import type { Asked, Found } from './list-differences';
-import { worthOfLines } from './worth-of-lines';
+import { linesByLoad, rowsOfLoads } from './load-rows';
 
 /** Shipments that nobody has counted although more than the partner's days have passed since they left (RULES 5). */
 export async function overdueRows(db: Reader, { query, after, limit, today }: Asked): Promise<Found[]> {
@@ -29,8 +22,7 @@ export async function overdueRows(db: Reader, { query, after, limit, today }: As
     .innerJoin(toCompany, eq(toCompany.id, shipments.toCompanyId))
     .where(
       and(
-        eq(shipments.state, 'on the way'),
-        sql`datediff(${today}, ${shipments.leftOn}) > if(${toCompany.kind} = 'partner', ${toCompany.overdueAfterDays}, ${fromCompany.overdueAfterDays})`,
+        overdueBy(today),
         onLaneOf(query.partner),
         query.type ? exists(linesOfType(db, query.type)) : undefined,
         holdsText(query.search, shipments.reference),
@@ -43,28 +35,19 @@ export async function overdueRows(db: Reader, { query, after, limit, today }: As
     db,
     rows.map((row) => row.shipment.id),
   );
-  const loads = rows.map((row) => ({
-    ...partnerOf(row),
-    day: row.shipment.leftOn,
-    lines: lines.get(row.shipment.id) ?? [],
-  }));
-  const worth = await worthOfLines(db, loads);
-  return rows.map((row, index) => ({
-    id: row.shipment.id,
-    kind: 'overdue' as const,
-    shipmentId: row.shipment.id,
-    importId: null,
-    reference: row.shipment.reference,
-    ...endsOf(row),
-    lines: [...(loads[index]?.lines ?? [])],
-    units: (loads[index]?.lines ?? []).reduce((total, line) => total + line.units, 0),
-    since: row.shipment.leftOn,
-    atStake: worth[index] ?? '0',
-    currency: loads[index]?.currency ?? '',
-    state: 'open' as const,
-    ways: [],
-    disputeId: null,
-  }));
+  return rowsOfLoads(
+    db,
+    rows.map((row) => ({
+      id: row.shipment.id,
+      kind: 'overdue',
+      shipmentId: row.shipment.id,
+      importId: null,
+      reference: row.shipment.reference,
+      since: row.shipment.leftOn,
+      lane: row,
+      lines: lines.get(row.shipment.id) ?? [],
+    })),
+  );
 }
 
 function linesOfType(db: Reader, typeCode: string) {
@@ -74,12 +57,11 @@ function linesOfType(db: Reader, typeCode: string) {
     .where(and(eq(shipmentLines.shipmentId, shipments.id), eq(shipmentLines.typeCode, typeCode)));
 }
 
-async function declaredOf(db: Reader, ids: readonly string[]): Promise<Map<string, Found['lines']>> {
-  const lines = new Map<string, Found['lines']>(ids.map((id) => [id, []]));
-  if (ids.length === 0) return lines;
+async function declaredOf(db: Reader, ids: readonly string[]): Promise<ReturnType<typeof linesByLoad>> {
+  if (ids.length === 0) return new Map();
   const rows = await db
     .select({
-      shipmentId: shipmentLines.shipmentId,
+      loadId: shipmentLines.shipmentId,
       typeCode: shipmentLines.typeCode,
       typeName: containerTypes.name,
       typeKind: containerTypes.kind,
@@ -89,6 +71,5 @@ async function declaredOf(db: Reader, ids: readonly string[]): Promise<Map<strin
     .innerJoin(containerTypes, eq(containerTypes.code, shipmentLines.typeCode))
     .where(inArray(shipmentLines.shipmentId, [...ids]))
     .orderBy(sql`${shipmentLines.declared} desc`, shipmentLines.typeCode);
-  for (const { shipmentId, ...line } of rows) lines.get(shipmentId)?.push(line);
-  return lines;
+  return linesByLoad(rows);
 }

@@ -4,18 +4,10 @@ import { containerTypes } from '@/db/schema/containers';
 import { receiptLines, receipts } from '@/db/schema/work';
 import { holdsText } from '../../http/search';
 import { keyset } from '../../http/sort';
-import {
-  endsOf,
-  fromCompany,
-  fromSite,
-  laneColumns,
-  onLaneOf,
-  partnerOf,
-  toCompany,
-  toSite,
-} from './lane-ends';
+import { fromCompany, fromSite, toCompany, toSite } from '../shipments/shipment-rows';
+import { laneColumns, onLaneOf } from './lane-ends';
 import type { Asked, Found } from './list-differences';
-import { worthOfLines } from './worth-of-lines';
+import { linesByLoad, rowsOfLoads } from './load-rows';
 
 /** Receipts from files that belong to no shipment of the book. */
 export async function unannouncedRows(db: Reader, { query, after, limit }: Asked): Promise<Found[]> {
@@ -42,28 +34,19 @@ export async function unannouncedRows(db: Reader, { query, after, limit }: Asked
     db,
     rows.map((row) => row.receipt.id),
   );
-  const loads = rows.map((row) => ({
-    ...partnerOf(row),
-    day: row.receipt.countedOn,
-    lines: lines.get(row.receipt.id) ?? [],
-  }));
-  const worth = await worthOfLines(db, loads);
-  return rows.map((row, index) => ({
-    id: row.receipt.id,
-    kind: 'unannounced' as const,
-    shipmentId: null,
-    importId: row.receipt.importId,
-    reference: row.receipt.reference,
-    ...endsOf(row),
-    lines: [...(loads[index]?.lines ?? [])],
-    units: (loads[index]?.lines ?? []).reduce((total, line) => total + line.units, 0),
-    since: row.receipt.countedOn,
-    atStake: worth[index] ?? '0',
-    currency: loads[index]?.currency ?? '',
-    state: 'open' as const,
-    ways: [],
-    disputeId: null,
-  }));
+  return rowsOfLoads(
+    db,
+    rows.map((row) => ({
+      id: row.receipt.id,
+      kind: 'unannounced',
+      shipmentId: null,
+      importId: row.receipt.importId,
+      reference: row.receipt.reference,
+      since: row.receipt.countedOn,
+      lane: row,
+      lines: lines.get(row.receipt.id) ?? [],
+    })),
+  );
 }
 
 function linesOfType(db: Reader, typeCode: string) {
@@ -73,12 +56,11 @@ function linesOfType(db: Reader, typeCode: string) {
     .where(and(eq(receiptLines.receiptId, receipts.id), eq(receiptLines.typeCode, typeCode)));
 }
 
-async function countedOf(db: Reader, ids: readonly string[]): Promise<Map<string, Found['lines']>> {
-  const lines = new Map<string, Found['lines']>(ids.map((id) => [id, []]));
-  if (ids.length === 0) return lines;
+async function countedOf(db: Reader, ids: readonly string[]): Promise<ReturnType<typeof linesByLoad>> {
+  if (ids.length === 0) return new Map();
   const rows = await db
     .select({
-      receiptId: receiptLines.receiptId,
+      loadId: receiptLines.receiptId,
       typeCode: receiptLines.typeCode,
       typeName: containerTypes.name,
       typeKind: containerTypes.kind,
@@ -88,6 +70,5 @@ async function countedOf(db: Reader, ids: readonly string[]): Promise<Map<string
     .innerJoin(containerTypes, eq(containerTypes.code, receiptLines.typeCode))
     .where(inArray(receiptLines.receiptId, [...ids]))
     .orderBy(sql`${receiptLines.counted} desc`, receiptLines.typeCode);
-  for (const { receiptId, ...line } of rows) lines.get(receiptId)?.push(line);
-  return lines;
+  return linesByLoad(rows);
 }
