@@ -2,7 +2,6 @@ import { Fragment } from 'react';
 import { Box } from '../ui/Box';
 import { StretchLink } from '../ui/StretchLink';
 import { RecordCard, RecordCards } from '../ui/RecordCard';
-import { Text } from '../ui/Text';
 import { CellText } from '../ui/CellText';
 import type { Column } from './column';
 
@@ -34,7 +33,7 @@ export function RecordCardList<Row>({ label, columns, rows, rowKey, rowHref }: P
                 )}
               </CellText>
               {inRole('aside').map((column) => (
-                <CellText key={column.key} strong>
+                <CellText key={column.key} strong firm>
                   {column.cell(row)}
                 </CellText>
               ))}
@@ -44,7 +43,9 @@ export function RecordCardList<Row>({ label, columns, rows, rowKey, rowHref }: P
             ))}
             {inRole('line').map((column) => (
               <Box key={column.key} row spread="between" gap="l" align="start">
-                <Text variant="soft">{column.head}</Text>
+                <CellText soft firm>
+                  {column.head}
+                </CellText>
                 <CellText end>{column.cell(row)}</CellText>
               </Box>
             ))}

@@ -7,16 +7,25 @@ export function CellText({
   children,
   strong,
   end,
+  firm,
+  soft,
 }: {
   children: ReactNode;
   strong?: boolean;
   end?: boolean;
+  /** Gives no room to what stands beside it: an amount is not broken by a long name. */
+  firm?: boolean;
+  soft?: boolean;
 }) {
   const bare = typeof children === 'string' || typeof children === 'number';
   return (
-    <View style={[styles.cell, end && styles.end]}>
+    <View style={[styles.cell, end && styles.end, firm && styles.firm]}>
       {bare ? (
-        <Text {...(strong ? { strong } : {})} {...(end ? { align: 'end' as const } : {})}>
+        <Text
+          {...(strong ? { strong } : {})}
+          {...(end ? { align: 'end' as const } : {})}
+          {...(soft ? { variant: 'soft' as const } : {})}
+        >
           {children}
         </Text>
       ) : (
@@ -29,4 +38,5 @@ export function CellText({
 const styles = StyleSheet.create({
   cell: { flexShrink: 1, minWidth: 0, position: 'static' },
   end: { alignItems: 'flex-end' },
+  firm: { flexShrink: 0, maxWidth: '60%' },
 });
