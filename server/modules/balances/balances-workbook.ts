@@ -2,6 +2,7 @@ import type { Reader } from '@/db/client';
 import type { BalanceRow, downloadBalances } from '@/shared/contracts/balances';
 import type { QueryOf } from '@/shared/contracts/operation';
 import { balances as words } from '@/shared/text/en/balances';
+import { everyPage } from '../../documents/every-page';
 import { listWorkbook, type SheetColumn } from '../../documents/list-workbook';
 import { workbookMediaType } from '../../documents/statement-workbook';
 import type { Person } from '../../http/person';
@@ -27,23 +28,12 @@ function columnsFor(day: string): readonly SheetColumn<BalanceRow>[] {
 }
 
 /** The balances as a spreadsheet, as of the day asked for or of today. */
-export function balancesWorkbook(db: Reader, asked: Asked): FileAnswer {
-  const day = asked.query.asOf ?? asked.today;
+export function balancesWorkbook(db: Reader, { query, ...asked }: Asked): FileAnswer {
+  const day = query.asOf ?? asked.today;
+  const pages = everyPage((page) => balanceRows(db, { ...asked, query: { ...query, ...page } }));
   return {
     name: `${words.head.operator} ${day}.xlsx`,
     mediaType: workbookMediaType,
-    content: listWorkbook({ name: words.head.operator, columns: columnsFor(day), pages: pagesOf(db, asked) }),
+    content: listWorkbook({ name: words.head.operator, columns: columnsFor(day), pages }),
   };
-}
-
-async function* pagesOf(db: Reader, { query, ...asked }: Asked): AsyncGenerator<readonly BalanceRow[]> {
-  let after: string | undefined;
-  do {
-    const page = await balanceRows(db, {
-      ...asked,
-      query: { ...query, limit: 50, ...(after === undefined ? {} : { after }) },
-    });
-    yield page.rows;
-    after = page.next ?? undefined;
-  } while (after !== undefined);
 }

@@ -2,6 +2,7 @@ import type { Reader } from '@/db/client';
 import type { QueryOf } from '@/shared/contracts/operation';
 import type { downloadShipments, ShipmentRow } from '@/shared/contracts/shipments';
 import { shipments as words } from '@/shared/text/en/shipments';
+import { everyPage } from '../../documents/every-page';
 import { listWorkbook, type SheetColumn } from '../../documents/list-workbook';
 import { workbookMediaType } from '../../documents/statement-workbook';
 import type { Person } from '../../http/person';
@@ -39,13 +40,9 @@ export function shipmentsWorkbook(db: Reader, asked: Asked): FileAnswer {
 }
 
 async function* pagesOf(db: Reader, { query, ...asked }: Asked): AsyncGenerator<Line[]> {
-  let after: string | undefined;
-  do {
-    const page = await listShipments(db, {
-      ...asked,
-      query: { ...query, limit: 200, ...(after === undefined ? {} : { after }) },
-    });
-    yield page.rows.flatMap((shipment) => shipment.lines.map((line) => ({ shipment, line })));
-    after = page.next ?? undefined;
-  } while (after !== undefined);
+  for await (const shipments of everyPage((page) =>
+    listShipments(db, { ...asked, query: { ...query, ...page } }),
+  )) {
+    yield shipments.flatMap((shipment) => shipment.lines.map((line) => ({ shipment, line })));
+  }
 }
