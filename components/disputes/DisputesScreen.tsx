@@ -1,9 +1,10 @@
 import { type DisputeRow, listDisputes, subjects } from '@/shared/contracts/disputes';
-import { listPartners } from '@/shared/contracts/partners';
 import { text } from '@/shared/text/catalogue';
-import { useRead, useReadPages } from '../data/use-operation';
+import { useReadPages } from '../data/use-operation';
+import { usePartnerOptions } from '../data/use-partner-options';
 import { useSignedIn } from '../data/use-session';
 import { ListAndDetail, useSideBySide } from '../tables/ListAndDetail';
+import { optionsOf } from '../tables/filter-options';
 import { RecordList } from '../tables/RecordList';
 import { useListState } from '../tables/use-list-state';
 import { ButtonLink } from '../ui/Link';
@@ -43,7 +44,7 @@ const usualFilters = [
     key: 'state',
     label: words.filter.state,
     usual: words.filter.undecided,
-    options: Object.entries(stateWords).map(([value, label]) => ({ value, label })),
+    options: optionsOf(stateWords),
   },
   {
     key: 'subject',
@@ -56,11 +57,9 @@ const usualFilters = [
 ];
 
 /** The operator can narrow the list to one partner. */
-function useFilters(isOperator: boolean) {
-  const query = { kind: 'partner', limit: 200 } as const;
-  const partners = useRead(listPartners, { query, enabled: isOperator }).data?.rows ?? [];
-  if (!isOperator) return usualFilters;
-  const options = partners.map(({ id, name }) => ({ value: id, label: name }));
+function useFilters() {
+  const options = usePartnerOptions();
+  if (options === null) return usualFilters;
   return [...usualFilters, { key: 'partner', label: words.filter.partner, options }];
 }
 
@@ -68,7 +67,7 @@ function DisputesList({ chosen }: { chosen?: string }) {
   const state = useListState({ filters: ['state', 'subject', 'partner'] });
   const list = useReadPages(listDisputes, { query: state.query });
   const isOperator = useSignedIn().company.kind === 'operator';
-  const filters = useFilters(isOperator);
+  const filters = useFilters();
   const asked = new URLSearchParams(state.query).toString();
   const empty = isOperator
     ? { title: words.emptyOperator, hint: words.emptyOperatorBody }

@@ -3,6 +3,7 @@ import { text } from '@/shared/text/catalogue';
 import { formatInstant } from '@/shared/text/format';
 import { useReadPages } from '../data/use-operation';
 import type { Column } from '../tables/column';
+import { optionsOf } from '../tables/filter-options';
 import { RecordList } from '../tables/RecordList';
 import { useListState } from '../tables/use-list-state';
 import { CellText } from '../ui/CellText';
@@ -38,7 +39,7 @@ const filters = [
     key: 'state',
     label: words.stateFilter,
     usual: words.anyState,
-    options: Object.entries(words.states).map(([value, label]) => ({ value, label })),
+    options: optionsOf(words.states),
   },
 ];
 

@@ -5,6 +5,7 @@ import { formatInstant } from '@/shared/text/format';
 import { useRead, useReadPages } from '../data/use-operation';
 import { useSignedIn } from '../data/use-session';
 import type { Column } from '../tables/column';
+import { optionsOf } from '../tables/filter-options';
 import { RecordList } from '../tables/RecordList';
 import { useListState } from '../tables/use-list-state';
 import { CellText } from '../ui/CellText';
@@ -48,7 +49,7 @@ const stateFilter = {
   key: 'state',
   label: words.stateFilter,
   usual: words.anyState,
-  options: Object.entries(words.states).map(([value, label]) => ({ value, label })),
+  options: optionsOf(words.states),
 };
 
 /** The operator can narrow the list to one company; a partner sees its own people only. */

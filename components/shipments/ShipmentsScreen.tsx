@@ -8,6 +8,7 @@ import { text } from '@/shared/text/catalogue';
 import { urlOf } from '../data/url-of';
 import { useRead, useReadPages } from '../data/use-operation';
 import { useSignedIn } from '../data/use-session';
+import { optionsOf } from '../tables/filter-options';
 import { RecordList } from '../tables/RecordList';
 import type { Filter } from '../tables/ListTools';
 import { useListState } from '../tables/use-list-state';
@@ -16,9 +17,6 @@ import { Page } from '../ui/Page';
 import { shipmentColumns } from './shipment-columns';
 
 const words = text.shipments;
-
-const optionsOf = (labels: Record<string, string>) =>
-  Object.entries(labels).map(([value, label]) => ({ value, label }));
 
 const usualFilters: readonly Filter[] = [
   { key: 'direction', label: words.filter.direction, options: optionsOf(words.direction) },

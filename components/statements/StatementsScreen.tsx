@@ -1,4 +1,3 @@
-import { listPartners } from '@/shared/contracts/partners';
 import {
   listStatements,
   statementAnswers,
@@ -6,7 +5,8 @@ import {
   statementStates,
 } from '@/shared/contracts/statements';
 import { text } from '@/shared/text/catalogue';
-import { useRead, useReadPages } from '../data/use-operation';
+import { useReadPages } from '../data/use-operation';
+import { usePartnerOptions } from '../data/use-partner-options';
 import { useSignedIn } from '../data/use-session';
 import { RecordList } from '../tables/RecordList';
 import { useListState } from '../tables/use-list-state';
@@ -24,7 +24,7 @@ export function StatementsScreen() {
     filters: kind === 'operator' ? ['month', 'partner', 'state', 'answer'] : ['month', 'answer'],
   });
   const list = useReadPages(listStatements, { query: state.query });
-  const filters = useFilters(kind);
+  const filters = useFilters();
   return (
     <Page title={text.statements.head} lead={words.lead[kind]}>
       <RecordList<StatementRow>
@@ -46,24 +46,21 @@ export function StatementsScreen() {
   );
 }
 
-function useFilters(kind: 'operator' | 'partner') {
-  const partners = useRead(listPartners, {
-    query: { kind: 'partner', limit: 200 },
-    enabled: kind === 'operator',
-  }).data;
+function useFilters() {
+  const partners = usePartnerOptions();
   const month = { key: 'month', label: words.filter.month, month: true as const };
   const answer = {
     key: 'answer',
     label: words.filter.answer,
     options: statementAnswers.map((value) => ({ value, label: text.statements.page.tags[value] })),
   };
-  if (kind === 'partner') return [month, answer];
+  if (partners === null) return [month, answer];
   return [
     month,
     {
       key: 'partner',
       label: words.filter.partner,
-      options: (partners?.rows ?? []).map(({ id, name }) => ({ value: id, label: name })),
+      options: partners,
     },
     {
       key: 'state',
