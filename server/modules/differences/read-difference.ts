@@ -38,13 +38,15 @@ export async function readDifference(db: Reader, { id, person, today }: Asked): 
     settlements: settled,
     swaps,
     bearers: bearersOf(selected),
-    choices: may(person, 'settle differences') ? choicesOf(difference.openUnits, swaps.length > 0) : [],
+    choices: may(person, 'settle differences')
+      ? choicesOf({ openUnits: difference.openUnits, hasSwap: swaps.length > 0 })
+      : [],
     timeZone: await zoneOf(db, difference.shipmentId),
   };
 }
 
 /** Nothing can be lost or turn up where more came than was declared. */
-function choicesOf(openUnits: number, hasSwap: boolean): ChosenWay[] {
+function choicesOf({ openUnits, hasSwap }: { openUnits: number; hasSwap: boolean }): ChosenWay[] {
   if (openUnits === 0) return [];
   return [
     'sender miscounted',
