@@ -7,8 +7,10 @@ export type Limits = {
   account: RateLimiterMySQL;
   /** Wrong passwords per address. */
   address: RateLimiterMySQL;
-  /** Links asked for, per address of mail and of network. */
+  /** Links asked for, per address of mail, and tries to change a password, per person. */
   links: RateLimiterMySQL;
+  /** Links asked for or used, per address of network: a whole company may come from one. */
+  linksFrom: RateLimiterMySQL;
 };
 
 /** Counters in MariaDB, shared by all servers; in memory only while the database is away. */
@@ -30,6 +32,7 @@ export function rateLimits(pool: Pool): Limits {
     account: limiter('account', { points: 10, duration: 900, blockDuration: 120 }),
     address: limiter('address', { points: 40, duration: 900, blockDuration: 300 }),
     links: limiter('link', { points: 5, duration: 3600 }),
+    linksFrom: limiter('links from', { points: 40, duration: 3600 }),
   };
 }
 

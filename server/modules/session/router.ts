@@ -38,7 +38,7 @@ export function sessionRoutes(limits: Limits): Route[] {
       return { csrfToken: csrfTokenOf(request, true) };
     }),
     open(contracts.askForReset, async ({ body, db, at }) => {
-      await useTry(limits.links, `address:${at.address}`);
+      await useTry(limits.linksFrom, `asked:${at.address}`);
       await useTry(limits.links, `mail:${body.email}`);
       await inTransaction(db, (tx) =>
         queueJob(tx, { kind: resetJob, payload: body, onceKey: `${resetJob} ${at.requestId}`, now: at.now }),
@@ -47,7 +47,7 @@ export function sessionRoutes(limits: Limits): Route[] {
       return { sent: true as const };
     }),
     open(contracts.choosePassword, async ({ body, db, at }) => {
-      await useTry(limits.links, `token:${at.address}`);
+      await useTry(limits.linksFrom, `used:${at.address}`);
       refuseCommon(body.password, []);
       const personId = await inTransaction(db, (tx) => choosePasswordBy(tx, { ...body, now: at.now }));
       const person = await readPerson(db, personId);

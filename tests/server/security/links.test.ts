@@ -92,4 +92,16 @@ describe('a link to choose a password', () => {
     expect(text).toContain('http://book.fennmark.example/choose-password?token=');
     expect(text).not.toContain('evil.example');
   });
+
+  it('is written five times an hour to one address, and a whole office can ask from one network', async () => {
+    const { email } = await aClerk();
+    const statuses: number[] = [];
+    for (let n = 1; n <= 6; n += 1)
+      statuses.push((await ask(product.app, 'post', '/password-resets')(held).send({ email })).status);
+    expect(statuses).toEqual([200, 200, 200, 200, 200, 429]);
+    const colleague = (await aClerk()).email;
+    expect((await ask(product.app, 'post', '/password-resets')(held).send({ email: colleague })).status).toBe(
+      200,
+    );
+  });
 });
