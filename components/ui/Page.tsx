@@ -50,14 +50,14 @@ export function Page({ action, aside, narrow, children, ...head }: Props) {
   const inBar = at === 'phone' || at === 'wide phone';
   const padding = { padding: at === 'phone' ? space.l : space.xxl, paddingTop: inBar ? space.l : space.xl };
   return (
-    <View style={[styles.page, padding]}>
+    <View id="page" style={[styles.page, padding]}>
       <Head {...head} action={inBar ? undefined : action} />
-      <View style={aside !== undefined && at === 'broad' ? styles.split : styles.whole}>
+      <div className={aside !== undefined && at === 'broad' ? 'tk-split' : 'tk-parts'}>
         <View style={[styles.main, narrow && styles.narrow]}>{children}</View>
         {aside === undefined ? null : (
           <View style={at === 'broad' ? styles.aside : styles.main}>{aside}</View>
         )}
-      </View>
+      </div>
       {inBar && action !== undefined ? <ActionBar>{action}</ActionBar> : null}
     </View>
   );
@@ -111,8 +111,6 @@ export function ActionBar({ children, note }: { children: ReactNode; note?: Reac
 
 const styles = StyleSheet.create({
   page: { gap: space.l, width: '100%', maxWidth: 1320 },
-  whole: { gap: space.l },
-  split: { flexDirection: 'row', gap: space.xl, alignItems: 'flex-start' },
   main: { gap: space.l, flexGrow: 1, flexShrink: 1, minWidth: 0 },
   narrow: { maxWidth: column, width: '100%' },
   aside: { width: 340, gap: space.l },
