@@ -41,7 +41,11 @@ export function CountLine({ at, line, onTakeOff }: Props) {
       <Head line={line} />
       <NumberField name={`lines.${at}.counted`} label={words.number(line.typeName)} hideLabel steps large />
       <Box row wrap spread="between" gap="s">
-        {typeof counted === 'number' ? <Tag {...differenceOf(counted - line.declared)} /> : <Box />}
+        {typeof counted === 'number' && counted >= 0 ? (
+          <Tag {...differenceOf(counted - line.declared)} />
+        ) : (
+          <Box />
+        )}
         {line.declared > 0 ? (
           <Button
             kind="quiet"
