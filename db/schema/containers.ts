@@ -8,15 +8,14 @@ import {
   uniqueIndex,
   varchar,
 } from 'drizzle-orm/mysql-core';
+import type { TypeKind } from '@/shared/contracts/container-types';
 import { amount, code, day, id, instant, json, rate } from '../columns';
 import { people, sites } from './companies';
-
-export const containerKinds = ['tote', 'lid', 'pallet', 'box', 'rack'] as const;
 
 export const containerTypes = mysqlTable('container_types', {
   code: code('code', { length: 20 }).primaryKey(),
   name: varchar('name', { length: 80 }).notNull(),
-  kind: varchar('kind', { length: 10 }).$type<(typeof containerKinds)[number]>().notNull(),
+  kind: varchar('kind', { length: 10 }).$type<TypeKind>().notNull(),
   lengthMm: int('length_mm').notNull(),
   widthMm: int('width_mm').notNull(),
   heightMm: int('height_mm').notNull(),

@@ -1,19 +1,11 @@
 import { bigint, check, index, mysqlTable, primaryKey, uniqueIndex, varchar } from 'drizzle-orm/mysql-core';
 import { sql } from 'drizzle-orm';
+import type { SettlementWay } from '@/shared/contracts/differences';
+import type { DisputeReason, DisputeState } from '@/shared/contracts/disputes';
 import { amount, code, day, id, instant, units } from '../columns';
 import { companies, people } from './companies';
 import { counts, shipments } from './shipments';
 import { files } from './files';
-
-export const settlementWays = [
-  'sender miscounted',
-  'receiver miscounted',
-  'lost on the way',
-  'turned up later',
-  'wrong type',
-  'within tolerance',
-] as const;
-export type SettlementWay = (typeof settlementWays)[number];
 
 /** One type of one counted shipment whose count differs from what was declared. */
 export const differences = mysqlTable(
@@ -70,24 +62,6 @@ export const settlements = mysqlTable(
   (table) => [index('settlements_difference').on(table.differenceId)],
 );
 
-export const disputeStates = [
-  'open',
-  'waiting for partner',
-  'accepted',
-  'accepted in part',
-  'declined',
-  'withdrawn',
-] as const;
-export type DisputeState = (typeof disputeStates)[number];
-export const disputeReasons = [
-  'counted wrongly',
-  'sent them back',
-  'never arrived',
-  'arrived damaged',
-  'wrong rate',
-  'other',
-] as const;
-
 export const disputes = mysqlTable(
   'disputes',
   {
@@ -105,7 +79,7 @@ export const disputes = mysqlTable(
     /** What the book says and what the partner says it should be. */
     stated: units('stated').notNull(),
     claimed: units('claimed').notNull(),
-    reason: varchar('reason', { length: 20 }).$type<(typeof disputeReasons)[number]>().notNull(),
+    reason: varchar('reason', { length: 20 }).$type<DisputeReason>().notNull(),
     state: varchar('state', { length: 20 }).$type<DisputeState>().notNull(),
     /** For a line that is not reckoned by units: the money claimed to be too much; else 0. */
     amountClaimed: amount('amount_claimed').notNull().default('0.0000'),

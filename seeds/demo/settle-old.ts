@@ -1,6 +1,7 @@
 import { and, eq, lte } from 'drizzle-orm';
 import type { Transaction } from '@/db/client';
-import { differences, type SettlementWay } from '@/db/schema/differences';
+import { differences } from '@/db/schema/differences';
+import type { SettlementWay } from '@/shared/contracts/differences';
 import { shipments } from '@/db/schema/shipments';
 import { settleDifference } from '@/server/modules/differences/settle-difference';
 import { Problem } from '@/shared/problems/problems';

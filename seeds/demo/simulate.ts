@@ -48,7 +48,7 @@ async function countArrivals(world: World, day: string): Promise<void> {
   await world.book.onDay(async (tx) => {
     for (const underway of arrived) {
       const isReturn = !['TARNBY', 'OSTREL'].includes(underway.fromSite);
-      const lines = underway.lines.map((line) => countedLine(line, world.draws, isReturn));
+      const lines = underway.lines.map((line) => countedLine(line, { draws: world.draws, isReturn }));
       await world.book.count(tx, { underway, on: day, lines });
       for (const line of lines)
         changeStock(world, { site: underway.toSite, typeCode: line.typeCode }, line.counted);
@@ -58,8 +58,7 @@ async function countArrivals(world: World, day: string): Promise<void> {
 
 function countedLine(
   line: { typeCode: string; declared: number },
-  draws: Draws,
-  isReturn: boolean,
+  { draws, isReturn }: { draws: Draws; isReturn: boolean },
 ): CountedLine {
   const miscount = draws.perMille(55) ? draws.whole(1, Math.max(1, Math.round(line.declared / 40))) : 0;
   const counted = Math.max(0, line.declared + (draws.perMille(180) ? miscount : -miscount));

@@ -7,6 +7,7 @@ import { measure } from './measures';
 import { operation } from './operation';
 
 export const typeKinds = ['tote', 'lid', 'pallet', 'box', 'rack'] as const;
+export type TypeKind = (typeof typeKinds)[number];
 
 const millimetres = z.int().min(1).max(20_000);
 /** What an engineer states of a type; figures as they stand on the maker's plate and in the drawing. */

@@ -19,6 +19,7 @@ export const chosenWays = [
 ] as const;
 export type ChosenWay = (typeof chosenWays)[number];
 export const allWays = [...chosenWays, 'within tolerance'] as const;
+export type SettlementWay = (typeof allWays)[number];
 
 const end = z.object({ companyId: id, company: z.string(), site: z.string() });
 const units = z.number().int();

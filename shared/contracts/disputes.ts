@@ -18,6 +18,8 @@ export const disputeStates = [
   'withdrawn',
 ] as const;
 export type DisputeState = (typeof disputeStates)[number];
+/** Open in the book, whoever has the next word. */
+export const undecided: readonly DisputeState[] = ['open', 'waiting for partner'];
 export const disputeReasons = [
   'counted wrongly',
   'sent them back',

@@ -1,7 +1,8 @@
 import { eq } from 'drizzle-orm';
 import { v7 as newId } from 'uuid';
 import type { Transaction } from '@/db/client';
-import { differences, settlements, type SettlementWay } from '@/db/schema/differences';
+import { differences, settlements } from '@/db/schema/differences';
+import type { SettlementWay } from '@/shared/contracts/differences';
 import { postEntry } from '../ledger/post-entry';
 import { refuseWhatCannotBe } from '../ledger/reckonable';
 import { recordEvents } from '../ledger/record-events';

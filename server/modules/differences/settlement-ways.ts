@@ -1,7 +1,8 @@
 import { eq, max } from 'drizzle-orm';
 import { v7 as newId } from 'uuid';
 import type { Transaction } from '@/db/client';
-import { differences, type SettlementWay } from '@/db/schema/differences';
+import { differences } from '@/db/schema/differences';
+import type { SettlementWay } from '@/shared/contracts/differences';
 import { countLines, counts } from '@/db/schema/shipments';
 import { Problem } from '@/shared/problems/problems';
 import { outsideAccount, siteAccount, transitAccount } from '../ledger/accounts';

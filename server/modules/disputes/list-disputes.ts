@@ -3,7 +3,7 @@ import type { Reader } from '@/db/client';
 import { disputes } from '@/db/schema/differences';
 import { shipments } from '@/db/schema/shipments';
 import { statements } from '@/db/schema/statements';
-import type { listDisputes as contract } from '@/shared/contracts/disputes';
+import { type listDisputes as contract, undecided } from '@/shared/contracts/disputes';
 import type { AnswerOf, QueryOf } from '@/shared/contracts/operation';
 import { cursor, cutPage } from '../../http/page';
 import { scopeOf } from '../../http/person';
@@ -41,8 +41,7 @@ function conditionsOf(query: Query, { person }: Seen): (SQL | undefined)[] {
 }
 
 function stateCondition(state: Query['state']): SQL | undefined {
-  if (state === 'undecided')
-    return and(inArray(disputes.state, ['open', 'waiting for partner']), isNotNull(disputes.openKey));
+  if (state === 'undecided') return and(inArray(disputes.state, [...undecided]), isNotNull(disputes.openKey));
   if (state === 'decided') return isNull(disputes.openKey);
   return eq(disputes.state, state);
 }

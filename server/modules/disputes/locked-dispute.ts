@@ -2,13 +2,11 @@ import { desc, eq } from 'drizzle-orm';
 import type { Transaction } from '@/db/client';
 import { people } from '@/db/schema/companies';
 import { disputeMessages, disputes } from '@/db/schema/differences';
+import { undecided } from '@/shared/contracts/disputes';
 import { Problem } from '@/shared/problems/problems';
 import { type Person, scopeOf } from '../../http/person';
 
 export type DisputeRow = typeof disputes.$inferSelect;
-export type DisputeState = DisputeRow['state'];
-
-export const undecided: readonly DisputeState[] = ['open', 'waiting for partner'];
 
 /** The dispute under lock, if it is this person's to see and not decided yet. */
 export async function lockedDispute(

@@ -3,12 +3,11 @@ import type { Reader } from '@/db/client';
 import { companies, people } from '@/db/schema/companies';
 import { disputeFiles, disputeMessages, disputes } from '@/db/schema/differences';
 import { files } from '@/db/schema/files';
-import type { DisputeDetail, DisputeMessage } from '@/shared/contracts/disputes';
+import { type DisputeDetail, type DisputeMessage, undecided } from '@/shared/contracts/disputes';
 import type { StoredFile } from '@/shared/contracts/files';
 import { Problem } from '@/shared/problems/problems';
 import { may, scopeOf } from '../../http/person';
 import { disputeRow, money, type Seen, selectDisputes, type SelectedDispute } from './dispute-rows';
-import { undecided } from './locked-dispute';
 
 /** The dispute with its thread, for its company and the operator; otherwise as if there were none. */
 export async function readDispute(

@@ -3,11 +3,11 @@ import type { Reader } from '@/db/client';
 import { companies, terms } from '@/db/schema/companies';
 import { differences, disputes } from '@/db/schema/differences';
 import { partnerEvents } from '@/db/schema/ledger';
+import { undecided } from '@/shared/contracts/disputes';
 import type { OpenItem } from '@/shared/contracts/months';
 import { lastDayOfMonth } from '@/shared/domain/calendar';
 import { isZero, roundToMinor } from '@/shared/domain/money';
 import { plain } from '../statements/assessment-input';
-import { undecided } from '../statements/held';
 import { uncountedByPartner } from './uncounted';
 
 const partner = { id: companies.id, name: companies.name, currency: companies.currency };

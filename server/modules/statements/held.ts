@@ -1,9 +1,8 @@
 import { and, eq, inArray, sum } from 'drizzle-orm';
 import type { Reader } from '@/db/client';
-import { disputes, type DisputeState } from '@/db/schema/differences';
+import { disputes } from '@/db/schema/differences';
+import { undecided } from '@/shared/contracts/disputes';
 import { plain } from './assessment-input';
-
-export const undecided: readonly DisputeState[] = ['open', 'waiting for partner'];
 
 /** What undecided disputes hold out of "due now", by statement; statements without any are left out. */
 export async function heldOf(db: Reader, statementIds: readonly string[]): Promise<Map<string, string>> {

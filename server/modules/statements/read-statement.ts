@@ -3,6 +3,7 @@ import type { Database } from '@/db/client';
 import { companies, people } from '@/db/schema/companies';
 import { disputeMessages, disputes } from '@/db/schema/differences';
 import { statements, statementSteps } from '@/db/schema/statements';
+import { undecided } from '@/shared/contracts/disputes';
 import type { AnswerOf } from '@/shared/contracts/operation';
 import type { readStatement } from '@/shared/contracts/statements';
 import { formatMinor } from '@/shared/domain/money';
@@ -11,7 +12,7 @@ import { Problem } from '@/shared/problems/problems';
 import { may, type Person, scopeOf } from '../../http/person';
 import { operatorZone } from '../partners/operator-day';
 import { plain } from './assessment-input';
-import { heldOf, undecided } from './held';
+import { heldOf } from './held';
 import { openDifferencesOf } from './open-differences-of';
 import { statementRowOf } from './statement-rows';
 

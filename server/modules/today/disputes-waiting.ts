@@ -1,4 +1,5 @@
 import { and, asc, count, eq, inArray, sql } from 'drizzle-orm';
+import { undecided } from '@/shared/contracts/disputes';
 import type { Reader } from '@/db/client';
 import { companies } from '@/db/schema/companies';
 import { containerTypes } from '@/db/schema/containers';
@@ -58,7 +59,7 @@ export async function moneyInDispute(db: Reader): Promise<{ disputes: number; he
     })
     .from(disputes)
     .innerJoin(companies, eq(companies.id, disputes.companyId))
-    .where(inArray(disputes.state, ['open', 'waiting for partner']))
+    .where(inArray(disputes.state, [...undecided]))
     .groupBy(companies.currency)
     .orderBy(companies.currency);
   return {

@@ -1,4 +1,5 @@
 import { and, asc, count, eq, inArray, lt, sql } from 'drizzle-orm';
+import { undecided } from '@/shared/contracts/disputes';
 import type { Reader } from '@/db/client';
 import { companies } from '@/db/schema/companies';
 import { disputes } from '@/db/schema/differences';
@@ -75,9 +76,7 @@ async function heldOn(db: Reader, ids: readonly string[]): Promise<Map<string | 
   const rows = await db
     .select({ statementId: disputes.statementId, held: sql<string>`sum(${disputes.amountHeld})` })
     .from(disputes)
-    .where(
-      and(inArray(disputes.statementId, [...ids]), inArray(disputes.state, ['open', 'waiting for partner'])),
-    )
+    .where(and(inArray(disputes.statementId, [...ids]), inArray(disputes.state, [...undecided])))
     .groupBy(disputes.statementId);
   return new Map(rows.map((row) => [row.statementId, row.held]));
 }
