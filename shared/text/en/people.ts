@@ -1,4 +1,3 @@
-
 export const people = {
   title: 'People',
   invite: 'Invite someone',
