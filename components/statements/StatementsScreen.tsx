@@ -35,7 +35,7 @@ export function StatementsScreen() {
         rowHref={(row) => `/statements/${row.id}`}
         state={state}
         filters={filters}
-        searchLabel={words.search}
+        searchLabel={words.search[kind]}
         empty={{
           title: words.empty,
           hint: words.emptyHint[kind],

@@ -172,7 +172,7 @@ export const statements = {
     total: 'Payable with tax',
     held: 'Held',
     answerBy: 'Answer by',
-    search: 'Partner or number',
+    search: { operator: 'Partner or number', partner: 'Number' },
     filter: { month: 'Month', partner: 'Partner', state: 'State', answer: 'Answer' },
     states: { draft: 'draft', issued: 'issued' },
     empty: 'No statements yet',
