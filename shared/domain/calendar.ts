@@ -47,10 +47,12 @@ function partsOf(text: string): DayParts {
 }
 
 /** A real day of the Gregorian calendar, 'YYYY-MM-DD'. */
-export const day = z.string().refine((text) => partsOrNull(text) !== null, { error: 'not a calendar day' });
+export const day = z
+  .string()
+  .refine((text) => partsOrNull(text) !== null, { error: 'Give a day of the calendar.' });
 
 /** A month, 'YYYY-MM'. */
-export const month = z.string().refine((text) => isMonth(text), { error: 'not a calendar month' });
+export const month = z.string().refine((text) => isMonth(text), { error: 'Give a month of the calendar.' });
 
 const isMonth = (text: string) => monthShape.test(text) && partsOrNull(`${text}-01`) !== null;
 
