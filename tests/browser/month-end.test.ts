@@ -185,7 +185,9 @@ journey('nothing is posted into the closed month, and what was typed stays', asy
   await ane.write('On', onDay(25));
   await ane.write('Reason', 'Found behind the washing line.');
   await ane.press('Book it');
-  await ane.sees('This month is closed. Post it as a correction, or ask finance to reopen.');
+  await ane.sees(
+    'This month is closed. Date it in an open month; what was wrong in a closed one is settled as a correction.',
+  );
   expect(await ane.field('Reason').inputValue()).toBe('Found behind the washing line.');
   await ane.isInOrder();
   await ane.write('On', today());

@@ -78,7 +78,8 @@ export const problems: Record<ClientProblemCode, (data: Data) => string> = {
     'The days to object to this statement are over, so its lines stand. You can still dispute the count behind them, on its shipment.',
   'already closed': () => 'This month is closed already. Nothing was changed.',
   'already issued': () => 'This statement went out already. Nothing was sent twice.',
-  'month closed': () => 'This month is closed. Post it as a correction, or ask finance to reopen.',
+  'month closed': () =>
+    'This month is closed. Date it in an open month; what was wrong in a closed one is settled as a correction.',
   'month not closed': () => 'This month is still open. Close it first.',
   'month not over': () => 'This month is not over yet. Close it after its last day.',
   'earlier month open': (data) =>
