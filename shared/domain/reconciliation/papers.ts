@@ -20,8 +20,9 @@ export interface Paper {
 
 export const laneOf = (from: string, to: string): string => JSON.stringify([from, to]);
 
-// R2 comes before R10.
-const inCountingOrder = (id: string) => id.replace(/\d+/g, (digits) => digits.padStart(15, '0'));
+// R2 comes before R10; an id of any other kind, as a UUID that grows with time, stands as it is.
+const inCountingOrder = (id: string) =>
+  /^\D*\d+$/.test(id) ? id.replace(/\d+$/, (digits) => digits.padStart(15, '0')) : id;
 
 const compare = <T>(a: T, b: T) => (a < b ? -1 : a > b ? 1 : 0);
 

@@ -62,6 +62,13 @@ describe('double entry', () => {
     expect(outcome.duplicates).toEqual([{ receipt: 'R10', of: 'R2' }]);
   });
 
+  test('on one day the first by id is kept, also among UUIDs that grow with time', () => {
+    const earlier = '019a2b3c-0000-7a10-8fff-0000000000aa';
+    const later = '019a2b3c-0000-7a9f-8000-000000000001';
+    const both = [aReceipt({ id: later }), aReceipt({ id: earlier })];
+    expect(outcomeFor([aShipment({ id: 'S1' })], both).duplicates).toEqual([{ receipt: later, of: earlier }]);
+  });
+
   test('both with the same miscount are one receipt entered twice', () => {
     const lines = totes(392);
     const outcome = outcomeFor([aShipment({ id: 'S1' })], [aReceipt({ id: 'R1', lines }), again({ lines })]);
