@@ -3,7 +3,7 @@ import { text } from '@/shared/text/catalogue';
 import { formatNumber } from '@/shared/text/format';
 import { Card } from '../ui/Card';
 import { Figure } from '../ui/Figure';
-import { RowLink } from '../ui/Link';
+import { Link, RowLink } from '../ui/Link';
 import { Strip } from '../ui/Strip';
 import { Text } from '../ui/Text';
 
@@ -47,15 +47,11 @@ export function HoldingCard({ today }: { today: Today }) {
                   href: '/shipments?direction=out&state=differs',
                 },
               ]),
-          {
-            key: 'toIt',
-            units: holding.toIt,
-            label: words.toIt,
-            tone: 'open',
-            href: '/shipments?direction=in&state=on%20the%20way',
-          },
         ]}
       />
+      {holding.toIt === 0 ? null : (
+        <Link href="/shipments?direction=in&state=on%20the%20way" label={words.moreToIt(holding.toIt)} />
+      )}
       {short && short.days < fewDays ? (
         <Text tone="differs">{words.lasts(short.typeName, formatNumber(short.days))}</Text>
       ) : null}

@@ -33,7 +33,8 @@ export const today = {
   atSites: 'at your site',
   sent: 'sent, not yet counted',
   sentDiffers: 'sent, counted otherwise',
-  toIt: 'on the way to you',
+  moreToIt: (units: number) =>
+    `${formatUnits(units)} more ${plural(units, { one: 'is', other: 'are' })} on the way to you`,
   lasts: (type: string, count: string) => `${type} last for ${count} days of packing.`,
   running: 'Running short',
   runningDays: (count: string) => `${count} d`,
