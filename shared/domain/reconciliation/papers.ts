@@ -20,17 +20,33 @@ export interface Paper {
 
 export const laneOf = (from: string, to: string): string => JSON.stringify([from, to]);
 
-// R2 comes before R10; an id of any other kind, as a UUID that grows with time, stands as it is.
-const inCountingOrder = (id: string) =>
-  /^\D*\d+$/.test(id) ? id.replace(/\d+$/, (digits) => digits.padStart(15, '0')) : id;
+interface Turn {
+  paper: Paper;
+  /** The id without the number at its end, and that number: R2 comes before R10. */
+  head: string;
+  tail: number;
+}
+
+// An id of any other kind, as a UUID that grows with time, stands as it is.
+function turnOf(paper: Paper): Turn {
+  const tail = /^\D*(\d{1,15})$/.exec(paper.id)?.[1];
+  if (tail === undefined) return { paper, head: paper.id, tail: -1 };
+  return { paper, head: paper.id.slice(0, -tail.length), tail: Number(tail) };
+}
 
 const compare = <T>(a: T, b: T) => (a < b ? -1 : a > b ? 1 : 0);
 
+const byDayThenId = (a: Turn, b: Turn): number =>
+  a.paper.day - b.paper.day ||
+  (a.head === b.head ? a.tail - b.tail : compare(a.head, b.head)) ||
+  compare(a.paper.id, b.paper.id);
+
 export function readPapers(documents: (DeclaredShipment | CountedReceipt)[]): Paper[] {
-  return documents
-    .map((document) => ({ paper: readPaper(document), key: inCountingOrder(document.id) }))
-    .sort((a, b) => a.paper.day - b.paper.day || compare(a.key, b.key) || compare(a.paper.id, b.paper.id))
-    .map(({ paper }, place) => ({ ...paper, place }));
+  const turns = documents.map((document) => turnOf(readPaper(document))).sort(byDayThenId);
+  return turns.map(({ paper }, place) => {
+    paper.place = place;
+    return paper;
+  });
 }
 
 function readPaper({ id, ref, from, to, date, lines }: DeclaredShipment | CountedReceipt): Paper {
